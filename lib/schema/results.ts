@@ -1,0 +1,133 @@
+import { z } from "zod";
+import { editionSchema } from "./calculation";
+
+/** The results object, format `leading-order/results/1`: what an evaluation gives back. */
+export const resultsFormat = "leading-order/results/1";
+
+export const errorCodes = [
+  "syntax",
+  "unknown-name",
+  "dimension",
+  "unit",
+  "cycle",
+  "duplicate-name",
+  "domain",
+  "overflow",
+  "forbidden",
+  "limit",
+  "depends",
+  "no-solution",
+] as const;
+
+export const errorCodeSchema = z.enum(errorCodes);
+
+/** A fault of one cell. `from` and `to` count characters of what was typed. */
+export const cellErrorSchema = z.object({
+  code: errorCodeSchema,
+  message: z.string(),
+  /** Which field of the cell the positions refer to, e.g. `formula`, `unit`, `condition`, `symbol`. */
+  field: z.string().optional(),
+  from: z.number().optional(),
+  to: z.number().optional(),
+  /** A replacement for the marked characters that would mend it. */
+  suggestion: z.string().optional(),
+});
+
+/** Something worth saying that does not stop the cell. */
+export const noticeSchema = z.object({
+  code: z.string(),
+  level: z.enum(["notice", "warning"]),
+  message: z.string(),
+  field: z.string().optional(),
+  from: z.number().optional(),
+  to: z.number().optional(),
+});
+
+const notices = { notices: z.array(noticeSchema).optional() };
+
+export const siSchema = z.object({
+  value: z.number(),
+  /** Exponents as rationals written as strings, zero ones left out. */
+  dimension: z.record(z.string(), z.string()),
+});
+
+const failed = z.object({
+  kind: z.enum(["given", "relation", "check", "text", "sweep", "solve"]),
+  status: z.literal("error"),
+  symbol: z.string().optional(),
+  error: cellErrorSchema,
+  ...notices,
+});
+
+export const textResultSchema = z.object({
+  kind: z.literal("text"),
+  status: z.literal("ok"),
+  ...notices,
+});
+
+export const givenResultSchema = z.object({
+  kind: z.literal("given"),
+  status: z.literal("ok"),
+  symbol: z.string(),
+  value: z.number(),
+  unit: z.string(),
+  si: siSchema,
+  uncertainty: z.number().nullable(),
+  ...notices,
+});
+
+export const relationResultSchema = z.object({
+  kind: z.literal("relation"),
+  status: z.literal("ok"),
+  symbol: z.string(),
+  value: z.number(),
+  unit: z.string(),
+  si: siSchema,
+  ...notices,
+});
+
+/** A relation that defines a function has no value of its own. */
+export const functionResultSchema = z.object({
+  kind: z.literal("relation"),
+  status: z.literal("ok"),
+  symbol: z.string(),
+  parameters: z.array(z.string()),
+  ...notices,
+});
+
+export const checkResultSchema = z.object({
+  kind: z.literal("check"),
+  status: z.literal("ok"),
+  holds: z.boolean(),
+  /** Left side over right side of a simple comparison; null where there is none. */
+  ratio: z.number().nullable(),
+  ...notices,
+});
+
+export const cellResultSchema = z.union([
+  failed,
+  textResultSchema,
+  givenResultSchema,
+  functionResultSchema,
+  relationResultSchema,
+  checkResultSchema,
+]);
+
+export const resultsSchema = z.object({
+  format: z.literal(resultsFormat),
+  engine: z.string(),
+  edition: editionSchema,
+  contentHash: z.string(),
+  cells: z.record(z.string(), cellResultSchema),
+});
+
+export type ErrorCode = z.infer<typeof errorCodeSchema>;
+export type CellError = z.infer<typeof cellErrorSchema>;
+export type Notice = z.infer<typeof noticeSchema>;
+export type FailedResult = z.infer<typeof failed>;
+export type GivenResult = z.infer<typeof givenResultSchema>;
+export type RelationResult = z.infer<typeof relationResultSchema>;
+export type FunctionResult = z.infer<typeof functionResultSchema>;
+export type CheckResult = z.infer<typeof checkResultSchema>;
+export type CellResult = z.infer<typeof cellResultSchema>;
+export type Results = z.infer<typeof resultsSchema>;

@@ -1,0 +1,2 @@
+/** Stands in for `server-only` where there is no React server bundle: in tests. */
+export {};
