@@ -69,16 +69,16 @@ function freeId(wanted: string, taken: ReadonlySet<string>): string {
  */
 function withFreshIds(base: CellsById, mine: readonly Cell[], theirs: CellsById) {
   const taken = new Set([...base.keys(), ...theirs.keys(), ...mine.map((cell) => cell.id)]);
-  const renamed: Record<string, string> = {};
+  const renamed: [string, string][] = [];
   const cells = mine.map((cell) => {
     const other = theirs.get(cell.id);
     if (base.has(cell.id) || !other || sameValue(cell, other)) return cell;
     const id = freeId(cell.id, taken);
     taken.add(id);
-    renamed[cell.id] = id;
+    renamed.push([cell.id, id]);
     return { ...cell, id };
   });
-  return { cells, renamed };
+  return { cells, renamed: Object.fromEntries(renamed) };
 }
 
 function mergeCell(base: Cell | null, mine: Cell | null, theirs: Cell | null): Choice<Cell | null> {

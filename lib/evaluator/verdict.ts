@@ -70,6 +70,11 @@ function cellDifferences(cell: string, recorded: CellResult, recomputed: CellRes
   });
 }
 
+/** A cell's result, never something that every object inherits. */
+function resultOf(results: Results, id: string): CellResult | undefined {
+  return Object.hasOwn(results.cells, id) ? results.cells[id] : undefined;
+}
+
 /**
  * What differs between two results objects, in the order of the recorded cells; cells that one side
  * lacks come as `missing`. Values are equal within 1e-12 relative, uncertainties within 1e-9; a
@@ -78,8 +83,8 @@ function cellDifferences(cell: string, recorded: CellResult, recomputed: CellRes
 export function compareResults(recorded: Results, recomputed: Results): Difference[] {
   const ids = new Set([...Object.keys(recorded.cells), ...Object.keys(recomputed.cells)]);
   return [...ids].flatMap((id) => {
-    const before = recorded.cells[id];
-    const after = recomputed.cells[id];
+    const before = resultOf(recorded, id);
+    const after = resultOf(recomputed, id);
     if (before && after) return cellDifferences(id, before, after);
     const [was, is] = [before, after].map((result) => (result ? statusOf(result) : null));
     return [difference(id, "missing", was ?? null, is ?? null, symbolOf(before, after))];

@@ -69,6 +69,11 @@ describe("compareResults", () => {
     expect(found).toMatchObject({ cell: "c", symbol: "M", ratio: 2 });
   });
 
+  it("does not take what every object inherits for a result", () => {
+    const [found] = compareResults(results({ constructor: given() }), results({}));
+    expect(found).toMatchObject({ cell: "constructor", what: "missing", recomputed: null });
+  });
+
   it("gives no ratio to zero", () => {
     const zero = results({ c: given({ value: 0 }) });
     expect(compareResults(zero, results({ c: given() }))[0]?.ratio).toBeNull();
