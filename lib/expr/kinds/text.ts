@@ -1,0 +1,11 @@
+import type { TextCell } from "../../schema/calculation";
+import type { KindOfCell } from "./kind";
+
+/** Prose: nothing to evaluate, nothing to go wrong. */
+export const textKind: KindOfCell<TextCell> = {
+  kind: "text",
+  declare: () => undefined,
+  read: () => ({ formulas: [] }),
+  signature: () => "",
+  evaluate: () => ({ result: { kind: "text", status: "ok" } }),
+};

@@ -1,0 +1,169 @@
+import { type Dimension, dimensionless, formatDimension } from "./dimension";
+import { formatUnit } from "./format-unit";
+import { parseUnit } from "./parse-unit";
+import type { EmConvention, UnitSystem } from "./unit-system";
+
+/** Names that the trade gives to dimensions, each with a unit one would state it in. */
+interface NameRow {
+  readonly name: string;
+  readonly unit: string;
+}
+
+const common: readonly (readonly [string, string])[] = [
+  ["length", "cm"],
+  ["area", "cm^2"],
+  ["volume", "cm^3"],
+  ["wavenumber", "cm^-1"],
+  ["time", "s"],
+  ["frequency", "s^-1"],
+  ["mass", "g"],
+  ["temperature", "K"],
+  ["amount of substance", "mol"],
+  ["luminous intensity", "cd"],
+  ["velocity", "cm/s"],
+  ["acceleration", "cm/s^2"],
+  ["momentum", "g cm/s"],
+  ["force", "dyn"],
+  ["energy", "erg"],
+  ["luminosity", "erg/s"],
+  ["energy density", "erg/cm^3"],
+  ["emissivity", "erg/s/cm^3"],
+  ["flux", "erg/s/cm^2"],
+  ["spectral flux per unit wavelength", "erg/s/cm^3"],
+  ["surface density", "g/cm^2"],
+  ["mass density", "g/cm^3"],
+  ["number density", "cm^-3"],
+  ["column density", "cm^-2"],
+  ["particle flux", "cm^-2 s^-1"],
+  ["rate per volume", "cm^-3 s^-1"],
+  ["rate coefficient", "cm^3/s"],
+  ["opacity", "cm^2/g"],
+  ["mass rate", "g/s"],
+  ["mass flux", "g/s/cm^2"],
+  ["angular momentum", "erg s"],
+  ["moment of inertia", "g cm^2"],
+  ["specific energy", "cm^2/s^2"],
+  ["kinematic viscosity", "cm^2/s"],
+  ["dynamic viscosity", "P"],
+  ["specific heating rate", "erg/s/g"],
+  ["entropy", "erg/K"],
+  ["specific entropy", "erg/K/g"],
+  ["thermal conductivity", "erg/s/cm/K"],
+  ["temperature gradient", "K/cm"],
+  ["energy flux per temperature to the fourth", "erg/s/cm^2/K^4"],
+  ["energy density per temperature to the fourth", "erg/cm^3/K^4"],
+  ["spectral flux density", "erg/s/cm^2/Hz"],
+  ["spectral luminosity per unit wavelength", "erg/s/cm"],
+  ["power per area and wavelength", "erg/s/cm^3"],
+  ["mass parameter", "cm^3/s^2"],
+  ["gravitational constant", "cm^3/g/s^2"],
+  ["mass per length", "g/cm"],
+  ["length per mass", "cm/g"],
+  ["reciprocal of a mass", "g^-1"],
+  ["reciprocal of an energy", "erg^-1"],
+  ["energy squared", "erg^2"],
+  ["time squared", "s^2"],
+  ["time per length", "s/cm"],
+  ["angular acceleration", "s^-2"],
+  ["mass squared", "g^2"],
+  ["energy per length", "erg/cm"],
+  ["energy times length", "erg cm"],
+  ["power per mass squared", "erg/s/g^2"],
+  ["molar energy", "erg/mol"],
+  ["molar heat capacity", "erg/mol/K"],
+  ["molar mass", "g/mol"],
+  ["reciprocal amount of substance", "mol^-1"],
+  ["length times temperature", "cm K"],
+  ["illuminance", "lx"],
+  ["cooling coefficient", "erg cm^3/s"],
+  ["mass to the power two thirds", "g^(2/3)"],
+];
+
+const siOnly: readonly (readonly [string, string])[] = [
+  ["electric current", "A"],
+  ["electric charge", "C"],
+  ["electric potential", "V"],
+  ["electric field", "V/m"],
+  ["magnetic flux density", "T"],
+  ["magnetic flux", "Wb"],
+  ["magnetic moment", "A m^2"],
+  ["magnetic field strength", "A/m"],
+  ["electric resistance", "ohm"],
+  ["electric conductivity", "S/m"],
+  ["capacitance", "F"],
+  ["inductance", "H"],
+  ["permittivity", "F/m"],
+  ["permeability", "H/m"],
+  ["charge density", "C/m^3"],
+  ["current density", "A/m^2"],
+  ["molar charge", "C/mol"],
+];
+
+const gaussianOnly: readonly (readonly [string, string])[] = [
+  ["magnetic or electric field", "gauss"],
+  ["electric charge", "esu"],
+  ["electric potential", "statV"],
+  ["electric current", "statA"],
+  ["magnetic flux", "Mx"],
+  ["magnetic moment", "erg/gauss"],
+];
+
+function tableFor(em: EmConvention): Map<Dimension, NameRow> {
+  const system: UnitSystem = { edition: "codata-2018", em };
+  const table = new Map<Dimension, NameRow>();
+  const gaussian = em === "gaussian" ? gaussianOnly : [];
+  for (const [name, unit] of [...common, ...gaussian, ...siOnly]) {
+    const parsed = parseUnit(unit, system);
+    if (parsed.ok && !table.has(parsed.dimension)) table.set(parsed.dimension, { name, unit });
+  }
+  table.set(dimensionless, { name: "pure number", unit: "" });
+  return table;
+}
+
+const tables = new Map<EmConvention, Map<Dimension, NameRow>>();
+
+function rowOf(of: Dimension, em: EmConvention): NameRow | undefined {
+  let table = tables.get(em);
+  if (!table) {
+    table = tableFor(em);
+    tables.set(em, table);
+  }
+  return table.get(of);
+}
+
+/** “luminosity”, “opacity”, …; undefined for a dimension that the trade has no name for. */
+export function dimensionName(of: Dimension, em: EmConvention = "si"): string | undefined {
+  return rowOf(of, em)?.name;
+}
+
+/** The unit one would state a named dimension in, in the unit language. */
+export function customaryUnit(of: Dimension, em: EmConvention = "si"): string | undefined {
+  return rowOf(of, em)?.unit;
+}
+
+/** “a luminosity (erg s⁻¹)”, “an energy (erg)”, “a quantity of dimension M L (g cm)”. */
+export function describeDimension(of: Dimension, em: EmConvention = "si"): string {
+  const row = rowOf(of, em);
+  if (of === dimensionless) return "a pure number";
+  const unit = formatUnit(row?.unit ?? baseUnits(of), { edition: "codata-2018", em });
+  if (!row) return `a quantity of dimension ${formatDimension(of)} (${unit})`;
+  return `${/^[aeio]/.test(row.name) ? "an" : "a"} ${row.name} (${unit})`;
+}
+
+const cgs = ["cm", "g", "s", "A", "K", "mol", "cd"];
+const order = [1, 0, 2, 3, 4, 5, 6];
+
+/** Any dimension in base units, CGS for mechanics: `g cm^-3`. */
+export function baseUnits(of: Dimension): string {
+  const parts = order.flatMap((i) => {
+    const exponent = of.exponents[i];
+    if (!exponent || exponent.equals(0)) return [];
+    if (exponent.equals(1)) return [cgs[i]];
+    return [
+      exponent.d === 1n
+        ? `${cgs[i]}^${exponent.toFraction()}`
+        : `${cgs[i]}^(${exponent.toFraction()})`,
+    ];
+  });
+  return parts.join(" ");
+}
