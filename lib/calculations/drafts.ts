@@ -106,7 +106,8 @@ export async function saveDraft(
       { revision: offered.revision, hash },
     );
     if (decision === "stale") return { refused: "stale", current };
-    if (decision === "unchanged") return { id, revision: current.revision, savedAt: current.savedAt };
+    if (decision === "unchanged")
+      return { id, revision: current.revision, savedAt: current.savedAt };
     return writeDraft(tx, permitted.actorId, calculation, offered.file, hash);
   });
 }

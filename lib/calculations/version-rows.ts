@@ -44,9 +44,7 @@ function reshape(row: VersionRow): StoredVersion {
     results: JSON.parse(row.results),
   });
   const withdrawn =
-    row.withdrawn_at === null
-      ? null
-      : { at: row.withdrawn_at, reason: row.withdrawn_reason ?? "" };
+    row.withdrawn_at === null ? null : { at: row.withdrawn_at, reason: row.withdrawn_reason ?? "" };
   return { file, withdrawn };
 }
 
@@ -110,11 +108,7 @@ export async function listPinned(tx: Knex, calculation: string): Promise<Pinned[
 }
 
 /** Writes a version; nothing in it can be changed afterwards. */
-export async function insertVersion(
-  tx: Knex,
-  authorId: string,
-  file: VersionFile,
-): Promise<void> {
+export async function insertVersion(tx: Knex, authorId: string, file: VersionFile): Promise<void> {
   const { version, results } = file;
   await tx("versions").insert({
     calculation_id: version.calculation,

@@ -149,9 +149,11 @@ export const hostileFormulas: readonly Group[] = [
     formulas: [
       "constructor",
       "constructor(1)",
+      "constructor()",
       "prototype",
       "toString",
       "toString(1)",
+      "toString(1, 2)",
       "valueOf",
       "hasOwnProperty",
       "hasOwnProperty(1)",
@@ -210,8 +212,6 @@ export const hostileFormulas: readonly Group[] = [
       "1 \ud800",
       "😀",
       "<script>alert(1)</script>",
-      "constructor()",
-      "toString(1, 2)",
     ],
   },
   {
@@ -250,6 +250,16 @@ export const hostileFormulas: readonly Group[] = [
     ],
   },
   {
+    about: "integrals that have no value, or none that can be found",
+    code: "domain",
+    formulas: [
+      "integrate(1 / x, x, 0, 1)",
+      "integrate(sin(1 / x) / x, x, 0, 1)",
+      nested(8, (inner) => `integrate(${inner} + sin(1e6 x), x, 0, 1)`),
+      nested(20, (inner) => `integrate(sin(1e4 x) + ${inner}, x, 0, 1)`),
+    ],
+  },
+  {
     about: "sums and integrals that would take for ever",
     code: "limit",
     formulas: [
@@ -259,8 +269,9 @@ export const hostileFormulas: readonly Group[] = [
       "sum(sum(sum(i j k, i, 1, 1e4), j, 1, 1e4), k, 1, 1e4)",
       "sum(factorial(i) / factorial(i), i, 1, 1e9)",
       nested(5, (inner) => `sum(${inner}, i, 1, 2000)`),
-      nested(8, (inner) => `integrate(${inner} + sin(1e6 x), x, 0, 1)`),
-      nested(20, (inner) => `integrate(sin(1e4 x) + ${inner}, x, 0, 1)`),
+      nested(8, (inner) => `integrate(exp(sin(9 x)) ${inner}, x, 0, 1)`),
+      nested(20, (inner) => `integrate(cos(9 x) + ${inner}, x, 0, 1)`),
+      nested(6, (inner) => `root(x - 0.3 + ${inner} / 1e9, x, 0, 1)`),
       "integrate(sum(sin(i x), i, 1, 1e7), x, 0, 1)",
       "sum(luminosity_distance(i), i, 1, 1e7)",
     ],
