@@ -1,0 +1,3 @@
+export { deliverDueMail } from "./deliver";
+export { compose, type MailMessage } from "./message";
+export { enqueue, listLocalMail, type WaitingMail } from "./outbox";
