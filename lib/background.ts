@@ -1,0 +1,49 @@
+import "server-only";
+import { db } from "@/db";
+import { migrate } from "@/db/migrate";
+import { sessionAdapter } from "@/lib/auth/adapter";
+import { startEvaluators } from "@/lib/evaluator";
+import { deliverDueMail } from "@/lib/mail";
+import { settings } from "@/lib/settings";
+
+const mailEveryMs = 2_000;
+const sweepEveryMs = 3600 * 1000;
+/** Answers to repeated writes are kept this long. */
+const idempotencyMs = 24 * 3600 * 1000;
+
+const kept = globalThis as { leadingOrderBackground?: boolean };
+
+/** Repeat some work, never two rounds at once; a round that fails is told and tried again. */
+function repeat(everyMs: number, work: () => Promise<unknown>): void {
+  const round = async () => {
+    try {
+      await work();
+    } catch (error) {
+      console.error("background work failed", error);
+    }
+    setTimeout(round, everyMs).unref();
+  };
+  setTimeout(round, everyMs).unref();
+}
+
+async function sweep(): Promise<void> {
+  const now = Date.now();
+  await sessionAdapter.deleteExpiredSessions();
+  await db()("email_tokens").where("expires_at", "<", new Date(now).toISOString()).delete();
+  const old = new Date(now - idempotencyMs).toISOString();
+  await db()("idempotency_keys").where("created_at", "<", old).delete();
+}
+
+/** Bring the database to its newest shape, warm the evaluators, send mail and sweep out. */
+export async function startBackground(): Promise<void> {
+  if (kept.leadingOrderBackground) return;
+  kept.leadingOrderBackground = true;
+  const { mailUrl, localMail } = settings();
+  if (mailUrl === undefined && !localMail) {
+    console.warn("MAIL_URL is not set: mail waits in the outbox and is not sent.");
+  }
+  await migrate(db());
+  await startEvaluators();
+  repeat(mailEveryMs, deliverDueMail);
+  repeat(sweepEveryMs, sweep);
+}
