@@ -1,13 +1,16 @@
 import { readFileSync, statSync } from "node:fs";
 import path from "node:path";
 import { parseArgs } from "node:util";
-import { type FileReading, readCalculationFile } from "../lib/calculations/read-file";
+import {
+  type FileReading,
+  mostFileBytes,
+  readCalculationFile,
+} from "../lib/calculations/read-file";
 import { closeEvaluators, evaluate, recompute, startEvaluators } from "../lib/evaluator";
 import {
   type CalculationFile,
   editionSchema,
   limitSentences,
-  limits,
   type Results,
   type Verdict,
 } from "../lib/schema";
@@ -42,8 +45,7 @@ function readBytes(name: string): Uint8Array {
   const file = path.resolve(process.env.INIT_CWD ?? ".", name);
   try {
     const { size } = statSync(file);
-    if (size > 8 * limits.fileBytes)
-      throw new UnusableError(`${name}: ${limitSentences.fileBytes(size)}`);
+    if (size > mostFileBytes) throw new UnusableError(`${name}: ${limitSentences.fileBytes(size)}`);
     return readFileSync(file);
   } catch (error) {
     if (error instanceof UnusableError) throw error;

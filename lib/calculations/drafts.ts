@@ -73,14 +73,14 @@ export function decideSave(
 
 async function writeDraft(
   tx: Knex,
-  actorId: string,
   calculation: CalculationRecord,
   file: CalculationFile,
   hash: string,
 ): Promise<Saved> {
   const at = now();
-  const entry = { calculation: calculation.id, after: calculation.revision, authorId: actorId };
-  const written = await insertRevision(tx, { ...entry, file, hash, at });
+  const entry = { calculation: calculation.id, after: calculation.revision };
+  const authorId = calculation.ownerId;
+  const written = await insertRevision(tx, { ...entry, authorId, file, hash, at });
   if (!written) throw new Error("The draft moved on within its own transaction.");
   return { id: calculation.id, revision: calculation.revision + 1, savedAt: at };
 }
@@ -108,7 +108,7 @@ export async function saveDraft(
     if (decision === "stale") return { refused: "stale", current };
     if (decision === "unchanged")
       return { id, revision: current.revision, savedAt: current.savedAt };
-    return writeDraft(tx, permitted.actorId, calculation, offered.file, hash);
+    return writeDraft(tx, calculation, offered.file, hash);
   });
 }
 
@@ -119,7 +119,7 @@ export async function changeVisibility(
   visibility: Visibility,
 ): Promise<{ id: string; visibility: Visibility } | Refusal> {
   return transaction(async (tx) => {
-    const permitted = await permit(tx, actor, "edit", id);
+    const permitted = await permit(tx, actor, "change-visibility", id);
     if (isRefused(permitted)) return permitted;
     await updateVisibility(tx, id, visibility);
     return { id, visibility };

@@ -19,7 +19,7 @@ export type FileReading =
   | { kind: "unusable"; why: string };
 
 /** A version file holds results beside its calculation; nothing larger than this is looked at. */
-const mostBytes = 8 * limits.fileBytes;
+export const mostFileBytes = 8 * limits.fileBytes;
 
 const unusable = (why: string): FileReading => ({ kind: "unusable", why });
 
@@ -83,11 +83,11 @@ function decode(bytes: Uint8Array): string | undefined {
  * the content hash that it records is unusable: its numbers would be cited for something else.
  */
 export function readCalculationFile(bytes: Uint8Array): FileReading {
-  if (bytes.byteLength > mostBytes) return unusable(limitSentences.fileBytes(bytes.byteLength));
+  if (bytes.byteLength > mostFileBytes) return unusable(limitSentences.fileBytes(bytes.byteLength));
   const text = decode(bytes);
   if (text === undefined) return unusable("it is not UTF-8 text");
   const json = readJson(text);
-  if (!json.ok) return unusable(json.message);
+  if (!json.ok) return unusable(`line ${json.line}, column ${json.column}: ${json.message}`);
   const document = json.value;
   if (typeof document !== "object" || document === null || Array.isArray(document))
     return unusable("it is not a JSON object");

@@ -70,7 +70,7 @@ async function writeVersion(
   if (isRefused(decision)) return decision;
   const { number } = decision;
   const content = { file: draft.file, results, summary: pinning.summary, number };
-  await insertVersion(tx, permitted.actorId, await nextVersion(tx, permitted, content));
+  await insertVersion(tx, permitted.calculation.ownerId, await nextVersion(tx, permitted, content));
   const { contentHash } = results;
   return { version: number, contentHash, url: versionPath(draft.id, number) };
 }

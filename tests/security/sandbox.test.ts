@@ -7,11 +7,11 @@ import { hostileFormulas } from "./hostile-formulas";
 function calculation(formula: string, title = formula.slice(0, 200)): CalculationFile {
   return {
     format: "leading-order/1",
-    title: title.replaceAll(/\p{Cc}/gu, "").toWellFormed(),
+    title: title.replaceAll(/\p{Cc}/gu, ""),
     edition: "codata-2022",
     cells: [
       { id: "m", kind: "given", symbol: "M", value: 10, unit: "Msun" },
-      { id: "x", kind: "relation", symbol: "y", formula: formula.toWellFormed() },
+      { id: "x", kind: "relation", symbol: "y", formula },
       { id: "g", kind: "relation", symbol: "E", formula: "M c^2", unit: "erg" },
     ],
   };

@@ -15,7 +15,7 @@ type Run = { code: number; out: string; err: string };
 /** Runs the command as npm does, in a folder of its own. */
 function recompute(...args: string[]): Promise<Run> {
   const command = ["--import", "tsx", "scripts/recompute.ts", ...args];
-  const env = { PATH: process.env.PATH ?? "", INIT_CWD: folder };
+  const env = { NODE_ENV: "test" as const, PATH: process.env.PATH ?? "", INIT_CWD: folder };
   return new Promise((resolve) => {
     execFile(process.execPath, command, { cwd: root, env }, (error, out, err) =>
       resolve({ code: typeof error?.code === "number" ? error.code : 0, out, err }),
