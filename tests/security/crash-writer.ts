@@ -1,5 +1,5 @@
 import { createCalculation, isRefused, pinVersion, saveDraft } from "@/lib/calculations";
-import { contentHash } from "@/lib/evaluator";
+import { contentHash, evaluatorIsWarm } from "@/lib/evaluator";
 import type { CalculationFile } from "@/lib/schema";
 
 /**
@@ -26,6 +26,8 @@ function content(step: number): CalculationFile {
   };
 }
 
+// Otherwise the first pin would wait for its process, and few would be met by a kill.
+await evaluatorIsWarm();
 const saved = await createCalculation(actor, content(0));
 let revision = saved.revision;
 acknowledge({ save: saved.id, revision, hash: contentHash(content(0)) });
