@@ -10,7 +10,14 @@ type Presented = NonNullable<EvaluateAnswer["presentation"]>["cells"];
 function ownNames(file: CalculationFile, shown: Presented): Completion[] {
   return file.cells.flatMap((cell) =>
     "symbol" in cell
-      ? [{ label: cell.symbol, type: "own", detail: shown[cell.id]?.valueText ?? cell.kind, boost: 2 }]
+      ? [
+          {
+            label: cell.symbol,
+            type: "own",
+            detail: shown[cell.id]?.valueText ?? cell.kind,
+            boost: 2,
+          },
+        ]
       : [],
   );
 }

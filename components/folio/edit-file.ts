@@ -7,7 +7,10 @@ const alphabet = "abcdefghjkmnpqrstvwxyz0123456789";
 /** An id that no cell of the file has; random, so that two browsers hardly ever choose the same. */
 export function newCellId(file: CalculationFile, random: () => number = Math.random): string {
   for (;;) {
-    const letters = Array.from({ length: 6 }, () => alphabet[Math.floor(random() * alphabet.length)]);
+    const letters = Array.from(
+      { length: 6 },
+      () => alphabet[Math.floor(random() * alphabet.length)],
+    );
     const id = `c${letters.join("")}`;
     if (!file.cells.some((cell) => cell.id === id)) return id;
   }
@@ -18,7 +21,11 @@ export function findCell(file: CalculationFile, id: string | null): Cell | undef
 }
 
 /** Put a cell behind another one; at the end without one. */
-export function insertCell(file: CalculationFile, cell: Cell, after: string | null): CalculationFile {
+export function insertCell(
+  file: CalculationFile,
+  cell: Cell,
+  after: string | null,
+): CalculationFile {
   const at = after === null ? -1 : file.cells.findIndex((one) => one.id === after);
   const index = at < 0 ? file.cells.length : at + 1;
   return { ...file, cells: [...file.cells.slice(0, index), cell, ...file.cells.slice(index)] };

@@ -10,7 +10,10 @@ export type Sent<T> =
 async function send<T>(path: string, init: RequestInit): Promise<Sent<T>> {
   let response: Response;
   try {
-    response = await fetch(path, { ...init, headers: { "content-type": "application/json", ...init.headers } });
+    response = await fetch(path, {
+      ...init,
+      headers: { "content-type": "application/json", ...init.headers },
+    });
   } catch (error) {
     if (error instanceof DOMException && error.name === "AbortError") throw error;
     return { ok: false, problem: undefined };
@@ -22,7 +25,10 @@ async function send<T>(path: string, init: RequestInit): Promise<Sent<T>> {
   return { ok: false, problem: undefined };
 }
 
-export function evaluateFile(file: CalculationFile, signal: AbortSignal): Promise<Sent<EvaluateAnswer>> {
+export function evaluateFile(
+  file: CalculationFile,
+  signal: AbortSignal,
+): Promise<Sent<EvaluateAnswer>> {
   const body = JSON.stringify({ file, present: true });
   return send("/api/evaluate", { method: "POST", body, signal });
 }
@@ -33,7 +39,11 @@ export function saveFile(
   revision: number,
 ): Promise<Sent<{ revision: number; savedAt: string }>> {
   const body = JSON.stringify({ file });
-  return send(`/api/calculations/${id}`, { method: "PUT", body, headers: { "if-match": `"${revision}"` } });
+  return send(`/api/calculations/${id}`, {
+    method: "PUT",
+    body,
+    headers: { "if-match": `"${revision}"` },
+  });
 }
 
 export function readDraft(id: string): Promise<Sent<Draft>> {
@@ -47,7 +57,10 @@ export function pinDraft(
   return send(`/api/calculations/${id}/versions`, { method: "POST", body: JSON.stringify(pin) });
 }
 
-export function changeVisibility(id: string, visibility: Visibility): Promise<Sent<{ visibility: Visibility }>> {
+export function changeVisibility(
+  id: string,
+  visibility: Visibility,
+): Promise<Sent<{ visibility: Visibility }>> {
   return send(`/api/calculations/${id}`, { method: "PATCH", body: JSON.stringify({ visibility }) });
 }
 

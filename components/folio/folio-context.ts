@@ -1,7 +1,7 @@
 "use client";
 
 import { createContext, type Dispatch, useContext } from "react";
-import type { CalculationFile, Cell, EvaluateAnswer } from "@/lib/schema";
+import type { CalculationFile, EvaluateAnswer } from "@/lib/schema";
 import type { FolioAction, FolioState } from "./folio-state";
 
 /** What every part of the folio may use. */
@@ -19,11 +19,4 @@ export function useFolio(): FolioContextValue {
   const value = useContext(FolioContext);
   if (!value) throw new Error("this component stands outside a folio");
   return value;
-}
-
-/** Props of every kind of cell. */
-export interface CellProps<C extends Cell = Cell> {
-  readonly cell: C;
-  readonly result: EvaluateAnswer["cells"][string] | undefined;
-  readonly shown: NonNullable<EvaluateAnswer["presentation"]>["cells"][string] | undefined;
 }

@@ -38,7 +38,12 @@ export type FolioAction =
   /** Somebody saved first: theirs and ours are merged by cell. */
   | { readonly type: "stale"; readonly theirs: Draft }
   /** Work kept in this browser comes back. */
-  | { readonly type: "restored"; readonly base: CalculationFile; readonly file: CalculationFile; readonly pending: FolioState["pending"] }
+  | {
+      readonly type: "restored";
+      readonly base: CalculationFile;
+      readonly file: CalculationFile;
+      readonly pending: FolioState["pending"];
+    }
   | { readonly type: "settled"; readonly file: CalculationFile; readonly conflict: Conflict };
 
 const mostSteps = 200;
@@ -68,11 +73,16 @@ function stepped(state: FolioState, from: "past" | "future"): FolioState {
   if (!file) return state;
   const rest = steps.slice(0, -1);
   return from === "past"
-    ? { ...state, file, past: rest, future: [...state.future, state.file], open: null }
-    : { ...state, file, future: rest, past: [...state.past, state.file], open: null };
+    ? { ...state, file, past: rest, future: [...state.future, state.file], open: null, pending: {} }
+    : { ...state, file, future: rest, past: [...state.past, state.file], open: null, pending: {} };
 }
 
-function merged(state: FolioState, mine: CalculationFile, from: CalculationFile, theirs: Base): FolioState {
+function merged(
+  state: FolioState,
+  mine: CalculationFile,
+  from: CalculationFile,
+  theirs: Base,
+): FolioState {
   const { file, conflicts } = merge(from, mine, theirs.file);
   return { ...state, file, base: theirs, conflicts };
 }

@@ -1,5 +1,5 @@
-import { type CalculationFile, calculationSchema } from "@/lib/schema";
 import { z } from "zod";
+import { type CalculationFile, calculationSchema } from "@/lib/schema";
 
 /**
  * Work that the server has not confirmed, kept in this browser. One entry a tab, so that two tabs of
@@ -26,7 +26,12 @@ const prefix = (calculation: string) => `leading-order:unsaved:${calculation}:`;
 /** An entry of another tab that has not been touched for so long belongs to a tab that is gone. */
 const abandonedMs = 15_000;
 
-export function keepWork(store: Store, calculation: string, tab: string, entry: JournalEntry): boolean {
+export function keepWork(
+  store: Store,
+  calculation: string,
+  tab: string,
+  entry: JournalEntry,
+): boolean {
   try {
     store.setItem(prefix(calculation) + tab, JSON.stringify(entry));
     return true;
@@ -41,7 +46,12 @@ export function forgetWork(store: Store, calculation: string, tab: string): void
 }
 
 /** Take over what this tab, or tabs that are gone, left unsaved; oldest first. */
-export function takeWork(store: Store, calculation: string, tab: string, now: number): JournalEntry[] {
+export function takeWork(
+  store: Store,
+  calculation: string,
+  tab: string,
+  now: number,
+): JournalEntry[] {
   const keys = Array.from({ length: store.length }, (_, i) => store.key(i) ?? "");
   const entries: JournalEntry[] = [];
   for (const key of keys.filter((one) => one.startsWith(prefix(calculation)))) {

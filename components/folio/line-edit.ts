@@ -46,7 +46,11 @@ export function newCell(line: string, id: string, system: System): Cell | undefi
 }
 
 /** The same words as another kind of cell. */
-export function asKind(cell: Cell, kind: "given" | "relation" | "check" | "text", system: System): Cell {
+export function asKind(
+  cell: Cell,
+  kind: "given" | "relation" | "check" | "text",
+  system: System,
+): Cell {
   const line = cellLine(cell);
   if (kind === "text") return { id: cell.id, kind, markdown: line };
   if (kind === "check") return { id: cell.id, kind, condition: line };

@@ -19,17 +19,32 @@ export interface SourceLineProps {
 }
 
 const theme = EditorView.theme({
-  "&": { fontFamily: "var(--font-mono)", fontSize: "0.9rem", background: "transparent", color: "var(--color-ink)" },
+  "&": {
+    fontFamily: "var(--font-mono)",
+    fontSize: "0.9rem",
+    background: "transparent",
+    color: "var(--color-ink)",
+  },
   "&.cm-focused": { outline: "none" },
   ".cm-content": { caretColor: "var(--color-calcium)", padding: "0.35rem 0" },
   ".cm-line": { padding: "0 0.25rem" },
-  ".cm-tooltip": { background: "var(--color-ground)", color: "var(--color-ink)", border: "1px solid var(--color-rule)" },
-  ".cm-tooltip-autocomplete ul li[aria-selected]": { background: "var(--color-calcium)", color: "var(--color-ground)" },
+  ".cm-tooltip": {
+    background: "var(--color-ground)",
+    color: "var(--color-ink)",
+    border: "1px solid var(--color-rule)",
+  },
+  ".cm-tooltip-autocomplete ul li[aria-selected]": {
+    background: "var(--color-calcium)",
+    color: "var(--color-ground)",
+  },
   ".cm-completionDetail": { fontStyle: "normal", opacity: "0.75", marginLeft: "1rem" },
   ".cm-diagnostic": { fontFamily: "var(--font-sans)", borderLeft: "3px solid var(--color-sodium)" },
   ".cm-diagnostic-error": { borderLeftColor: "var(--color-halpha)" },
   ".cm-lintRange-error": { backgroundImage: "none", borderBottom: "2px solid var(--color-halpha)" },
-  ".cm-lintRange-warning, .cm-lintRange-info": { backgroundImage: "none", borderBottom: "2px dotted var(--color-sodium)" },
+  ".cm-lintRange-warning, .cm-lintRange-info": {
+    backgroundImage: "none",
+    borderBottom: "2px dotted var(--color-sodium)",
+  },
 });
 
 /** Only one line: a pasted line break becomes a space. */
@@ -92,7 +107,11 @@ export default function SourceLine(props: SourceLineProps) {
   return <div ref={holder} className="source-line" />;
 }
 
-function startState(line: string, label: string, latest: { current: SourceLineProps }): EditorState {
+function startState(
+  line: string,
+  label: string,
+  latest: { current: SourceLineProps },
+): EditorState {
   const text = (view: EditorView) => view.state.doc.toString();
   return EditorState.create({
     doc: line,
@@ -101,21 +120,41 @@ function startState(line: string, label: string, latest: { current: SourceLinePr
       history(),
       oneLine,
       EditorView.lineWrapping,
-      EditorView.contentAttributes.of({ "aria-label": label, spellcheck: "false", autocapitalize: "off" }),
+      EditorView.contentAttributes.of({
+        "aria-label": label,
+        spellcheck: "false",
+        autocapitalize: "off",
+      }),
       autocompletion({
         icons: false,
         override: [
           (context) => {
             const word = context.matchBefore(/[\p{L}][\p{L}\p{N}_]*/u);
             if (!word && !context.explicit) return null;
-            return { from: word?.from ?? context.pos, options: latest.current.completions(), validFor: /^[\p{L}\p{N}_]*$/u };
+            return {
+              from: word?.from ?? context.pos,
+              options: latest.current.completions(),
+              validFor: /^[\p{L}\p{N}_]*$/u,
+            };
           },
         ],
       }),
       keymap.of([
         ...completionKeymap,
-        { key: "Enter", run: (view) => (latest.current.onFinish(text(view)), true) },
-        { key: "Escape", run: () => (latest.current.onClose(), true) },
+        {
+          key: "Enter",
+          run: (view) => {
+            latest.current.onFinish(text(view));
+            return true;
+          },
+        },
+        {
+          key: "Escape",
+          run: () => {
+            latest.current.onClose();
+            return true;
+          },
+        },
         ...historyKeymap,
         ...standardKeymap,
       ]),

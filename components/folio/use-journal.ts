@@ -24,7 +24,11 @@ export interface JournalState {
 }
 
 /** Keeps unsaved work in this browser until the server has confirmed it, and brings it back. */
-export function useJournal(id: string, state: FolioState, dispatch: Dispatch<FolioAction>): JournalState {
+export function useJournal(
+  id: string,
+  state: FolioState,
+  dispatch: Dispatch<FolioAction>,
+): JournalState {
   const [restored, setRestored] = useState(false);
   const [keeping, setKeeping] = useState(true);
   const [ready, setReady] = useState(false);
@@ -39,11 +43,19 @@ export function useJournal(id: string, state: FolioState, dispatch: Dispatch<Fol
 
   useEffect(() => {
     if (!ready) return;
-    const unsaved = !sameValue(state.file, state.base.file) || Object.keys(state.pending).length > 0;
+    const unsaved =
+      !sameValue(state.file, state.base.file) || Object.keys(state.pending).length > 0;
     if (!unsaved) return forgetWork(localStorage, id, tabName());
     const { file, pending } = state;
     const keep = () => {
-      setKeeping(keepWork(localStorage, id, tabName(), { base: state.base.file, file, pending, at: Date.now() }));
+      setKeeping(
+        keepWork(localStorage, id, tabName(), {
+          base: state.base.file,
+          file,
+          pending,
+          at: Date.now(),
+        }),
+      );
     };
     keep();
     // The time of the entry tells other tabs that this one is alive.

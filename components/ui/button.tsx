@@ -14,11 +14,20 @@ const shape =
   "inline-flex items-center justify-center min-h-9 border px-3 py-1.5 font-sans text-sm leading-tight cursor-pointer disabled:cursor-default disabled:opacity-60 transition-colors motion-reduce:transition-none";
 
 /** A button; `look` says how much it matters. */
-export function Button({ look = "plain", className = "", type = "button", ...rest }: ComponentProps<"button"> & { look?: Look }) {
+export function Button({
+  look = "plain",
+  className = "",
+  type = "button",
+  ...rest
+}: ComponentProps<"button"> & { look?: Look }) {
   return <button type={type} className={`${shape} ${looks[look]} ${className}`} {...rest} />;
 }
 
 /** A link that looks like a button. */
-export function ButtonLink({ look = "plain", className = "", ...rest }: ComponentProps<typeof Link> & { look?: Look }) {
+export function ButtonLink({
+  look = "plain",
+  className = "",
+  ...rest
+}: ComponentProps<typeof Link> & { look?: Look }) {
   return <Link className={`${shape} no-underline ${looks[look]} ${className}`} {...rest} />;
 }

@@ -6,7 +6,15 @@ import { Button } from "./button";
 const saidMs = 1_500;
 
 /** Copies a text and says so. */
-export function CopyButton({ text, label = "copy", what }: { text: string; label?: string; what?: string }) {
+export function CopyButton({
+  text,
+  label = "copy",
+  what,
+}: {
+  text: string;
+  label?: string;
+  what?: string;
+}) {
   const [said, setSaid] = useState<string>();
   const copy = async () => {
     const done = await navigator.clipboard.writeText(text).then(

@@ -4,7 +4,17 @@ import { type ReactNode, useEffect, useId, useRef } from "react";
 import { Button } from "./button";
 
 /** A dialog of the browser's own kind: it keeps the focus, and Escape closes it. */
-export function Dialog({ title, open, onClose, children }: { title: string; open: boolean; onClose: () => void; children: ReactNode }) {
+export function Dialog({
+  title,
+  open,
+  onClose,
+  children,
+}: {
+  title: string;
+  open: boolean;
+  onClose: () => void;
+  children: ReactNode;
+}) {
   const dialog = useRef<HTMLDialogElement>(null);
   const id = useId();
   useEffect(() => {

@@ -9,7 +9,9 @@ type FieldProps = Omit<ComponentProps<"input">, "id"> & {
 /** A labelled input with a hint and, after a try that failed, what is wrong with it. */
 export function Field({ label, hint, error, className = "", ...rest }: FieldProps) {
   const id = useId();
-  const described = [hint ? `${id}-hint` : "", error ? `${id}-error` : ""].filter(Boolean).join(" ");
+  const described = [hint ? `${id}-hint` : "", error ? `${id}-error` : ""]
+    .filter(Boolean)
+    .join(" ");
   return (
     <div className={`font-sans ${className}`}>
       <label htmlFor={id} className="block text-sm font-medium">

@@ -12,7 +12,10 @@ const tones: Record<Tone, { rule: string; word: string }> = {
 export function Message({ tone = "notice", children }: { tone?: Tone; children: ReactNode }) {
   const { rule, word } = tones[tone];
   return (
-    <div role={tone === "error" ? "alert" : "status"} className={`border-l-4 ${rule} py-1 pl-3 font-sans text-sm`}>
+    <div
+      role={tone === "error" ? "alert" : "status"}
+      className={`border-l-4 ${rule} py-1 pl-3 font-sans text-sm`}
+    >
       <span className="sr-only">{word}: </span>
       {children}
     </div>

@@ -7,7 +7,9 @@ export function Time({ iso, withTime = true }: { iso: string; withTime?: boolean
   const utc = `${iso.slice(0, 10)}${withTime ? ` ${iso.slice(11, 16)} UTC` : ""}`;
   const [shown, setShown] = useState(utc);
   useEffect(() => {
-    const style = withTime ? ({ dateStyle: "medium", timeStyle: "short" } as const) : ({ dateStyle: "medium" } as const);
+    const style = withTime
+      ? ({ dateStyle: "medium", timeStyle: "short" } as const)
+      : ({ dateStyle: "medium" } as const);
     setShown(new Intl.DateTimeFormat("en-GB", style).format(new Date(iso)));
   }, [iso, withTime]);
   return (

@@ -1,0 +1,91 @@
+"use client";
+
+import { useState } from "react";
+import { Prose } from "@/components/typeset/prose";
+import type { CalculationFile } from "@/lib/schema";
+import { limits } from "@/lib/schema/limits";
+
+const editions = [
+  ["codata-2018", "CODATA 2018"],
+  ["codata-2022", "CODATA 2022"],
+] as const;
+
+interface HeadProps {
+  readonly file: CalculationFile;
+  readonly edit: (file: CalculationFile, quiet?: boolean) => void;
+}
+
+/** Title, abstract, constants edition and electromagnetic convention of the draft. */
+export function FolioHead({ file, edit }: HeadProps) {
+  const [writing, setWriting] = useState(false);
+  return (
+    <header className="folio-head">
+      <h1 className="sr-only">{file.title || "Untitled calculation"}</h1>
+      <input
+        aria-label="Title"
+        className="folio-title"
+        maxLength={limits.titleLength}
+        placeholder="Title"
+        value={file.title}
+        onChange={(event) =>
+          edit({ ...file, title: event.target.value.replace(/\p{Cc}/gu, " ") }, true)
+        }
+      />
+      {writing ? (
+        <textarea
+          // biome-ignore lint/a11y/noAutofocus: the person has just asked to edit the abstract.
+          autoFocus
+          aria-label="Abstract, CommonMark with $…$"
+          className="prose-editor"
+          rows={4}
+          value={file.abstract ?? ""}
+          onChange={(event) => edit({ ...file, abstract: event.target.value }, true)}
+          onBlur={() => setWriting(false)}
+          onKeyDown={(event) => event.key === "Escape" && setWriting(false)}
+        />
+      ) : (
+        <button
+          type="button"
+          className="folio-abstract"
+          onClick={() => setWriting(true)}
+          aria-label="Edit the abstract"
+        >
+          {file.abstract ? (
+            <Prose markdown={file.abstract} />
+          ) : (
+            <span className="text-faint italic">Abstract</span>
+          )}
+        </button>
+      )}
+      <div className="flex flex-wrap gap-x-6 gap-y-1 font-sans text-sm">
+        <label>
+          Constants{" "}
+          <select
+            className="folio-select"
+            value={file.edition}
+            onChange={(event) =>
+              edit({ ...file, edition: event.target.value as CalculationFile["edition"] })
+            }
+          >
+            {editions.map(([name, title]) => (
+              <option key={name} value={name}>
+                {title}
+              </option>
+            ))}
+          </select>
+        </label>
+        <label>
+          Electromagnetic convention{" "}
+          <select
+            className="folio-select"
+            value={file.em ?? "si"}
+            onChange={(event) => edit({ ...file, em: event.target.value as "si" | "gaussian" })}
+          >
+            <option value="si">SI</option>
+            <option value="gaussian">Gaussian</option>
+          </select>
+        </label>
+      </div>
+    </header>
+  );
+}
