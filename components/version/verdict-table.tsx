@@ -35,7 +35,7 @@ export function VerdictTable({ verdict }: { verdict: Verdict }) {
         {verdict.differences.length === 1 ? "result differs" : "results differ"} {under}.
       </p>
       {/* biome-ignore lint/a11y/noNoninteractiveTabindex: a wide table is scrolled by keyboard. */}
-      <div className="overflow-x-auto" role="region" aria-label="What moved" tabIndex={0}>
+      <section className="overflow-x-auto" aria-label="What moved" tabIndex={0}>
         <table className="mt-2 w-full text-sm tabular-nums">
           <caption className="sr-only">What moved between the record and today</caption>
           <thead>
@@ -53,7 +53,7 @@ export function VerdictTable({ verdict }: { verdict: Verdict }) {
             ))}
           </tbody>
         </table>
-      </div>
+      </section>
     </>
   );
 }
