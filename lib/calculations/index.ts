@@ -30,3 +30,4 @@ export {
   type Withdrawn,
   withdrawVersion,
 } from "./versions";
+export { illFormedSentence, isWellFormed } from "./well-formed";

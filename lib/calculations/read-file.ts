@@ -11,6 +11,7 @@ import {
   versionFileSchema,
 } from "@/lib/schema";
 import { readJson } from "@/lib/schema/read-json";
+import { illFormedSentence, isWellFormed } from "./well-formed";
 
 /** What a file turned out to hold, or the one line that says why it cannot be used. */
 export type FileReading =
@@ -91,6 +92,7 @@ export function readCalculationFile(bytes: Uint8Array): FileReading {
   const document = json.value;
   if (typeof document !== "object" || document === null || Array.isArray(document))
     return unusable("it is not a JSON object");
+  if (!isWellFormed(document)) return unusable(illFormedSentence);
   const wrongFormat = whyNotThisFormat(document);
   if (wrongFormat) return unusable(wrongFormat);
   return withinSize("version" in document ? readVersion(document) : readCalculation(document));

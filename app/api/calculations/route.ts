@@ -1,5 +1,10 @@
 import { z } from "zod";
-import { createCalculation, listCalculations } from "@/lib/calculations";
+import {
+  createCalculation,
+  illFormedSentence,
+  isWellFormed,
+  listCalculations,
+} from "@/lib/calculations";
 import { json, route } from "@/lib/http";
 import { createCalculationSchema } from "@/lib/schema";
 import { entityTag } from "./entity-tag";
@@ -17,7 +22,10 @@ export const GET = route({ permission: "anyone", query: listSchema }, async ({ p
 
 /** Start a calculation from a file; it is private until its author opens it. */
 export const POST = route(
-  { permission: "signed-in", body: createCalculationSchema },
+  {
+    permission: "signed-in",
+    body: createCalculationSchema.refine(isWellFormed, illFormedSentence),
+  },
   async ({ person, body }) => {
     const saved = await createCalculation(person, body.file);
     return json(saved, {

@@ -1,4 +1,11 @@
-import { changeVisibility, deleteDraft, readDraft, saveDraft } from "@/lib/calculations";
+import {
+  changeVisibility,
+  deleteDraft,
+  illFormedSentence,
+  isWellFormed,
+  readDraft,
+  saveDraft,
+} from "@/lib/calculations";
 import { json, route } from "@/lib/http";
 import { saveCalculationSchema, visibilityChangeSchema } from "@/lib/schema";
 import { entityTag, requireRevision } from "../entity-tag";
@@ -16,7 +23,11 @@ export const GET = route(
 
 /** Save the draft that was made from the revision in `If-Match`. */
 export const PUT = route(
-  { permission: "signed-in", params: calculationParameters, body: saveCalculationSchema },
+  {
+    permission: "signed-in",
+    params: calculationParameters,
+    body: saveCalculationSchema.refine(isWellFormed, illFormedSentence),
+  },
   async ({ request, person, params, body }) => {
     const revision = requireRevision(request);
     const saved = granted(await saveDraft(person, params.id, { file: body.file, revision }));
