@@ -5,7 +5,17 @@ import { Button } from "./button";
 
 const saidMs = 1_500;
 
-/** Copies a text and says so. */
+/** True once the text is on the clipboard; browsers refuse it on pages without TLS. */
+async function writeClipboard(text: string): Promise<boolean> {
+  try {
+    await navigator.clipboard.writeText(text);
+    return true;
+  } catch {
+    return false;
+  }
+}
+
+/** Copies a text and says so. `what` names the thing for those who cannot see what stands beside. */
 export function CopyButton({
   text,
   label = "copy",
@@ -17,16 +27,16 @@ export function CopyButton({
 }) {
   const [said, setSaid] = useState<string>();
   const copy = async () => {
-    const done = await navigator.clipboard.writeText(text).then(
-      () => "copied",
-      () => "not copied: select it by hand",
-    );
-    setSaid(done);
+    setSaid((await writeClipboard(text)) ? "copied" : "not copied: select it by hand");
     setTimeout(() => setSaid(undefined), saidMs);
   };
   return (
-    <Button look="quiet" onClick={copy} aria-label={what ? `${label} ${what}` : undefined}>
-      <span aria-live="polite">{said ?? label}</span>
+    <Button look="quiet" onClick={copy}>
+      {said ?? label}
+      {what && !said && <span className="sr-only">&nbsp;{what}</span>}
+      <span role="status" className="sr-only">
+        {said}
+      </span>
     </Button>
   );
 }

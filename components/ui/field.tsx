@@ -2,7 +2,7 @@ import { type ComponentProps, useId } from "react";
 
 type FieldProps = Omit<ComponentProps<"input">, "id"> & {
   label: string;
-  hint?: string;
+  hint?: string | undefined;
   error?: string | undefined;
 };
 
@@ -21,7 +21,7 @@ export function Field({ label, hint, error, className = "", ...rest }: FieldProp
         id={id}
         aria-invalid={error ? true : undefined}
         aria-describedby={described || undefined}
-        className={`mt-1 block w-full border-b bg-transparent px-1 py-1.5 ${error ? "border-halpha" : "border-ink"}`}
+        className={`mt-1 block min-h-10 w-full border bg-transparent px-2.5 py-1.5 ${error ? "border-halpha" : "border-edge"}`}
         {...rest}
       />
       {hint && (
@@ -30,7 +30,7 @@ export function Field({ label, hint, error, className = "", ...rest }: FieldProp
         </p>
       )}
       {error && (
-        <p id={`${id}-error`} className="mt-1 text-sm text-halpha">
+        <p id={`${id}-error`} className="mt-1 text-sm font-medium text-halpha">
           {error}
         </p>
       )}
