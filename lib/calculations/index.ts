@@ -25,6 +25,7 @@ export {
   pinVersion,
   readVersion,
   recomputeVersion,
+  type Tampered,
   type VersionReading,
   versionPath,
   type Withdrawn,

@@ -1,7 +1,15 @@
 import type { Knex } from "knex";
 import { db, transaction } from "@/db";
-import { editionHash, evaluate, recompute, versionHash } from "@/lib/evaluator";
-import type { CalculationFile, Draft, Results, Role, Verdict, Visibility } from "@/lib/schema";
+import { contentHash, editionHash, evaluate, recompute, versionHash } from "@/lib/evaluator";
+import {
+  type CalculationFile,
+  calculationOf,
+  type Draft,
+  type Results,
+  type Role,
+  type Verdict,
+  type Visibility,
+} from "@/lib/schema";
 import { type Actor, type Permitted, permit } from "./access";
 import { decidePin, type PinDecision, versionFile } from "./decide-pin";
 import { loadDraft, type Stale } from "./drafts";
@@ -121,15 +129,27 @@ export async function readVersion(
   };
 }
 
-/** Evaluates a version again, under its own constants edition or another; saves nothing. */
+/** What is stored is not what was pinned: its recorded hash is another. */
+export type Tampered = { refused: "hash" };
+
+function isAsPinned({ file }: StoredVersion): boolean {
+  const hash = contentHash(calculationOf(file));
+  return file.version.contentHash === hash && file.results.contentHash === hash;
+}
+
+/**
+ * Evaluates a version again, under its own constants edition or another; saves nothing. Refused for
+ * content that does not have the recorded hash, whose verdict would be on something else.
+ */
 export async function recomputeVersion(
   actor: Actor,
   id: string,
   number: number,
   edition?: CalculationFile["edition"],
-): Promise<Verdict | Refusal> {
+): Promise<Verdict | Tampered | Refusal> {
   const reading = await readVersion(actor, id, number);
-  return isRefused(reading) ? reading : recompute(reading.file, edition);
+  if (isRefused(reading)) return reading;
+  return isAsPinned(reading) ? recompute(reading.file, edition) : { refused: "hash" };
 }
 
 export type Withdrawn = { withdrawnAt: string; reason: string };

@@ -7,7 +7,7 @@ type AnyRefusal =
   | Stale
   | { refused: "errors"; cells: FaultyCell[] }
   | { refused: "same"; version: number }
-  | { refused: "has-versions" | "withdrawn" };
+  | { refused: "has-versions" | "withdrawn" | "hash" };
 
 function problemOf(refusal: AnyRefusal): HttpProblem {
   switch (refusal.refused) {
@@ -30,6 +30,11 @@ function problemOf(refusal: AnyRefusal): HttpProblem {
     case "has-versions":
       return new HttpProblem("conflict", {
         detail: "It has versions, which somebody may have cited. Withdraw them instead.",
+      });
+    case "hash":
+      return new HttpProblem("conflict", {
+        detail:
+          "The hash does not match: what is stored is not what was pinned. Tell who runs this server.",
       });
     case "withdrawn":
       return new HttpProblem("conflict", { detail: "This version is withdrawn already." });

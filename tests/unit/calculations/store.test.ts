@@ -289,6 +289,8 @@ describe("verify", () => {
       expect.stringMatching(/^version 1: hash does not match/),
       expect.stringMatching(/^version 2: hash does not match/),
     ]);
+    expect(await recomputeVersion(author, id, 1)).toEqual({ refused: "hash" });
+    expect(await recomputeVersion(author, id, 2)).toMatchObject({ verdict: "reproduces" });
   });
 
   it("names a version whose results were forged, by the chain", async () => {
