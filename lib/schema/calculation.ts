@@ -16,7 +16,10 @@ const finite = z.number();
 
 export const cellIdSchema = z
   .string()
-  .regex(/^[A-Za-z0-9_-]{1,40}$/, "A cell id is 1 to 40 letters, digits, - or _.");
+  .regex(
+    /^[A-Za-z0-9][A-Za-z0-9_-]{0,39}$/,
+    "A cell id is 1 to 40 letters, digits, - or _, and begins with a letter or digit.",
+  );
 
 const cellBase = { id: cellIdSchema, note: prose.optional() };
 
