@@ -42,35 +42,48 @@ export function dimension(exponents: Partial<Record<BaseQuantity, number | strin
 /** The dimension of a pure number. */
 export const dimensionless: Dimension = dimension({});
 
-type Pairs = Map<Dimension, Map<Dimension, Dimension>>;
+/** More results than any calculation needs; beyond it a table is emptied, so that none grows for ever. */
+const mostRemembered = 20_000;
 
-/** Remembered results of an operation on two dimensions: there are few of them in one calculation. */
-function remembering(operation: (a: Fraction, b: Fraction) => Fraction) {
-  const known: Pairs = new Map();
-  return (a: Dimension, b: Dimension): Dimension => {
-    let row = known.get(a);
-    if (!row) {
-      row = new Map();
-      known.set(a, row);
-    }
-    const found = row.get(b);
+/** Remembers what `make` answers for a dimension and a second key: two look-ups instead of algebra. */
+function remembering<K>(make: (of: Dimension, key: K) => Dimension) {
+  const known = new Map<Dimension, Map<K, Dimension>>();
+  let size = 0;
+  return (of: Dimension, key: K): Dimension => {
+    const found = known.get(of)?.get(key);
     if (found) return found;
-    const made = intern(a.exponents.map((x, i) => operation(x, b.exponents[i] ?? new Fraction(0))));
-    row.set(b, made);
+    if (size >= mostRemembered) {
+      known.clear();
+      size = 0;
+    }
+    const made = make(of, key);
+    const row = known.get(of) ?? new Map<K, Dimension>();
+    known.set(of, row.set(key, made));
+    size += 1;
     return made;
   };
 }
 
+const zero = new Fraction(0);
+
 /** The dimension of a product. */
-export const multiplyDimensions = remembering((a, b) => a.add(b));
+export const multiplyDimensions: (a: Dimension, b: Dimension) => Dimension = remembering(
+  (a, b: Dimension) => intern(a.exponents.map((x, i) => x.add(b.exponents[i] ?? zero))),
+);
 
 /** The dimension of a quotient. */
-export const divideDimensions = remembering((a, b) => a.sub(b));
+export const divideDimensions: (a: Dimension, b: Dimension) => Dimension = remembering(
+  (a, b: Dimension) => intern(a.exponents.map((x, i) => x.sub(b.exponents[i] ?? zero))),
+);
+
+const power = remembering((of, key: string | number) => {
+  const exponent = new Fraction(key);
+  return intern(of.exponents.map((x) => x.mul(exponent)));
+});
 
 /** The dimension of a power; a number is taken as the rational nearest to it. */
 export function powerDimension(of: Dimension, exponent: Fraction | number): Dimension {
-  const power = new Fraction(exponent);
-  return intern(of.exponents.map((x) => x.mul(power)));
+  return power(of, typeof exponent === "number" ? exponent : exponent.toFraction());
 }
 
 /** Exponents as rationals written as strings, zero ones left out: `{"mass": "1", "length": "3/2"}`. */

@@ -14,7 +14,22 @@ export interface Unit {
   readonly dimension: Dimension;
   /** The nominal GM of a body mass: the factor is this over the edition's G. */
   readonly nominalGM?: number;
+  /** Set for a unit that only one electromagnetic convention has in this sense. */
+  readonly conventionOnly?: EmConvention;
+  /** Its row in the table, for the symbol without the prefix. */
   readonly row: UnitRow;
+}
+
+/** A row of the table as help and completion show it: with its factor settled. */
+export interface ListedUnit {
+  readonly symbol: string;
+  readonly name: string;
+  readonly aliases: readonly string[];
+  readonly dimension: Dimension;
+  /** To coherent SI, under the edition and the convention asked for. */
+  readonly factor: number;
+  readonly prefixes: readonly string[];
+  readonly source: string;
 }
 
 const kilogram = dimension({ mass: 1 });
@@ -25,31 +40,36 @@ function editionValue(edition: EditionName, symbol: string): number {
 }
 
 function toUnit(row: UnitRow, prefix: string, system: UnitSystem): Unit {
-  const scale = prefix === "" ? 1 : (prefixes[prefix] ?? 1);
-  const symbol = prefix === "μ" || prefix === "u" ? `µ${row.symbol}` : prefix + row.symbol;
+  const symbol = prefix === "u" ? `µ${row.symbol}` : prefix + row.symbol;
   if (row.massParameter) {
     const factor = row.factor / editionValue(system.edition, "G");
     return { symbol, factor, dimension: kilogram, nominalGM: row.factor, row };
   }
+  const scale = prefixes[prefix] ?? 1;
   // The atomic mass unit is measured, so it is the edition's.
   const factor = Number.isNaN(row.factor) ? editionValue(system.edition, "u_amu") : row.factor;
-  return { symbol, factor: factor * scale, dimension: row.dimension, row };
+  const only = row.convention === undefined ? {} : { conventionOnly: row.convention };
+  return { symbol, factor: factor * scale, dimension: row.dimension, row, ...only };
 }
 
-function applies(row: UnitRow, em: EmConvention): boolean {
-  return row.convention === undefined || row.convention === em;
+function rowsOf(em: EmConvention): readonly UnitRow[] {
+  return unitRows.filter((row) => row.convention === undefined || row.convention === em);
 }
 
-function search(name: string, system: UnitSystem): Unit | undefined {
-  const rows = unitRows.filter((row) => applies(row, system.em));
+function prefixableNames(row: UnitRow): readonly string[] {
+  return [row.symbol, ...row.aliases, ...(row.prefixedAliases ?? [])];
+}
+
+/** Exact rows come first, so that `min` is a minute, `cd` a candela and `mas` an angle. */
+function search(typed: string, system: UnitSystem): Unit | undefined {
+  const name = typed.length > 1 ? typed.replace(/^[µμ]/u, "u") : typed;
+  const rows = rowsOf(system.em);
   const exact = rows.find((row) => row.symbol === name || row.aliases.includes(name));
   if (exact) return toUnit(exact, "", system);
   for (const row of rows) {
-    for (const prefix of row.prefixes) {
-      if ([row.symbol, ...row.aliases].some((one) => prefix + one === name)) {
-        return toUnit(row, prefix, system);
-      }
-    }
+    const names = prefixableNames(row);
+    const prefix = row.prefixes.find((one) => names.some((rest) => one + rest === name));
+    if (prefix !== undefined) return toUnit(row, prefix, system);
   }
   return undefined;
 }
@@ -59,7 +79,7 @@ const mostFound = 5_000;
 
 /** One unit by its exact symbol, prefix included; undefined where it is none under the convention. */
 export function findUnit(name: string, system: UnitSystem): Unit | undefined {
-  const key = `${name} ${system.edition} ${system.em}`;
+  const key = `${system.edition} ${system.em} ${name}`;
   if (found.has(key)) return found.get(key);
   if (found.size >= mostFound) found.clear();
   const unit = search(name, system);
@@ -67,16 +87,24 @@ export function findUnit(name: string, system: UnitSystem): Unit | undefined {
   return unit;
 }
 
-/** True for a unit that only the other electromagnetic convention has. */
+const current = 3;
+
+/**
+ * True for a unit that belongs to the other electromagnetic convention: `esu` in an SI calculation,
+ * where it is no unit at all; `T` or `C` in a Gaussian one, where it keeps its SI dimension, so that
+ * mixing it with Gaussian quantities is a dimension error that can name the converter.
+ */
 export function unitOfOtherConvention(name: string, em: EmConvention): boolean {
-  const other = { edition: "codata-2018", em: em === "si" ? "gaussian" : "si" } as const;
-  const here = { edition: "codata-2018", em } as const;
-  return findUnit(name, here) === undefined && findUnit(name, other) !== undefined;
+  const here = findUnit(name, { edition: "codata-2018", em });
+  if (em === "gaussian") return here !== undefined && here.dimension.exponents[current]?.n !== 0n;
+  return !here && findUnit(name, { edition: "codata-2018", em: "gaussian" }) !== undefined;
 }
 
 /** Every unit of a convention, in the order of the table. */
-export function listUnits(system: UnitSystem): readonly (UnitRow & { readonly unit: Unit })[] {
-  return unitRows
-    .filter((row) => applies(row, system.em))
-    .map((row) => ({ ...row, unit: toUnit(row, "", system) }));
+export function listUnits(system: UnitSystem): ListedUnit[] {
+  return rowsOf(system.em).map((row) => {
+    const { symbol, name, aliases, prefixes: allowed, source } = row;
+    const { factor, dimension: of } = toUnit(row, "", system);
+    return { symbol, name, aliases, dimension: of, factor, prefixes: allowed, source };
+  });
 }

@@ -1,9 +1,10 @@
-import Fraction from "fraction.js";
 import { superscriptExponent } from "./dimension";
-import { parseUnit, type UnitFactor } from "./parse-unit";
+import { parseUnit } from "./parse-unit";
+import type { UnitFactor } from "./unit-reader";
 import type { UnitSystem } from "./unit-system";
 
-const pretty: Readonly<Record<string, string>> = {
+/** Symbols of the trade for the names of the unit language, in running text. */
+const textSymbols: Readonly<Record<string, string>> = {
   Msun: "M⊙",
   Rsun: "R⊙",
   Lsun: "L⊙",
@@ -16,58 +17,61 @@ const pretty: Readonly<Record<string, string>> = {
   ohm: "Ω",
   percent: "%",
   deg: "°",
+  uas: "µas",
   day: "d",
   hr: "h",
 };
 
-const texNames: Readonly<Record<string, string>> = {
-  Msun: "M_{\\odot}",
-  Rsun: "R_{\\odot}",
-  Lsun: "L_{\\odot}",
-  Mearth: "M_{\\oplus}",
-  Rearth: "R_{\\oplus}",
-  Mjup: "M_{\\mathrm{J}}",
-  Rjup: "R_{\\mathrm{J}}",
-  angstrom: "\\mathrm{\\mathring{A}}",
+/** The same inside `\mathrm{…}`, where they are written differently. */
+const texSymbols: Readonly<Record<string, string>> = {
+  Msun: "M_\\odot",
+  Rsun: "R_\\odot",
+  Lsun: "L_\\odot",
+  Mearth: "M_\\oplus",
+  Rearth: "R_\\oplus",
+  Mjup: "M_J",
+  Rjup: "R_J",
+  angstrom: "\\mathring{A}",
   ohm: "\\Omega",
   percent: "\\%",
   deg: "{}^{\\circ}",
+  uas: "\\mu as",
 };
 
-function prettySymbol({ unit }: UnitFactor): string {
-  const shown = pretty[unit.row.symbol];
-  return shown === undefined ? unit.symbol : unit.symbol.replace(unit.row.symbol, shown);
+function prefixOf({ unit }: UnitFactor): string {
+  return unit.symbol.slice(0, unit.symbol.length - unit.row.symbol.length);
+}
+
+function textFactor(factor: UnitFactor): string {
+  const { symbol } = factor.unit.row;
+  const shown = prefixOf(factor) + (textSymbols[symbol] ?? symbol);
+  return shown + superscriptExponent(factor.exponent);
 }
 
 /** “erg s⁻¹ cm⁻²”: quotients as negative powers, the order kept. The text itself if it is no unit. */
 export function formatUnit(text: string, system: UnitSystem): string {
   const unit = parseUnit(text, system);
-  if (!unit.ok) return text;
-  return unit.factors
-    .map((factor) => prettySymbol(factor) + superscriptExponent(factor.exponent))
-    .join(" ");
-}
-
-function texSymbol({ unit }: UnitFactor): string {
-  const { symbol } = unit.row;
-  const prefix = unit.symbol.slice(0, unit.symbol.length - symbol.length);
-  const prefixTex = prefix === "µ" ? "\\mu" : prefix === "" ? "" : `\\mathrm{${prefix}}`;
-  const special = texNames[symbol];
-  if (special !== undefined) return prefixTex + special;
-  const plain = pretty[symbol] ?? symbol;
-  return prefix === "µ" ? `\\mu\\mathrm{${plain}}` : `\\mathrm{${prefix}${plain}}`;
+  return unit.ok ? unit.factors.map(textFactor).join(" ") : text;
 }
 
 function texFactor(factor: UnitFactor): string {
-  const base = texSymbol(factor);
-  if (factor.exponent.equals(new Fraction(1))) return base;
-  const exponent = factor.exponent.toFraction();
-  return base.includes("_{") ? `{${base}}^{${exponent}}` : `${base}^{${exponent}}`;
+  const { symbol } = factor.unit.row;
+  const prefix = prefixOf(factor);
+  const shown = texSymbols[symbol] ?? textSymbols[symbol] ?? symbol;
+  const whole = `${prefix === "µ" ? "\\mu " : prefix}${shown}`;
+  if (factor.exponent.equals(1)) return whole;
+  // A sign of its own above needs a group below the exponent.
+  const base = symbol === "deg" ? `{${whole}}` : whole;
+  return `${base}^{${factor.exponent.toFraction()}}`;
 }
 
-/** The same as TeX, upright, with thin spaces. */
+/**
+ * The same as TeX: upright, with thin spaces, `\mathrm{erg\,s^{-1}\,cm^{-2}}`. A pure number is an
+ * empty text; what is no unit is set as text.
+ */
 export function unitTex(text: string, system: UnitSystem): string {
   const unit = parseUnit(text, system);
   if (!unit.ok) return `\\text{${text.replace(/[\\{}$&#^_%~]/g, " ")}}`;
-  return unit.factors.map(texFactor).join("\\,");
+  if (unit.factors.length === 0) return "";
+  return `\\mathrm{${unit.factors.map(texFactor).join("\\,")}}`;
 }

@@ -16,8 +16,6 @@ export const prefixes: Readonly<Record<string, number>> = {
   c: 1e-2,
   m: 1e-3,
   u: 1e-6,
-  µ: 1e-6,
-  μ: 1e-6,
   n: 1e-9,
   p: 1e-12,
   f: 1e-15,
@@ -28,5 +26,5 @@ export const prefixes: Readonly<Record<string, number>> = {
   q: 1e-30,
 };
 
-/** Every prefix, for the units of the SI. */
+/** Every prefix, for the units of the SI. Micro is `u` in the tables, `µ` or `μ` as well when typed. */
 export const allPrefixes: readonly string[] = Object.keys(prefixes);

@@ -7,8 +7,13 @@ export interface UnitRow {
   readonly symbol: string;
   readonly name: string;
   readonly aliases: readonly string[];
+  /** Names that hold behind a prefix only: `µG` is a microgauss, `G` alone the constant. */
+  readonly prefixedAliases?: readonly string[];
   readonly dimension: Dimension;
-  /** To coherent SI; for the body masses, the nominal GM, to be divided by the edition's G. */
+  /**
+   * To coherent SI; for the body masses, the nominal GM, to be divided by the edition's G; not a
+   * number for the atomic mass unit, which is the edition's.
+   */
   readonly factor: number;
   readonly prefixes: readonly string[];
   readonly source: string;
@@ -44,12 +49,14 @@ const brochure = "SI Brochure, 9th edition (BIPM 2019)";
 const sp811 = "NIST SP 811 (2008), appendix B";
 const iauStyle = "IAU Style Manual (Wilkins 1989)";
 const iau2015 = "IAU 2015 Resolution B3";
-const ngVlx = ["k", "M", "G"];
-const wide = ["p", "n", "u", "µ", "μ", "m", "k", "M", "G", "T", "P"];
+const large = ["k", "M", "G"];
+const wide = ["p", "n", "u", "m", "k", "M", "G", "T", "P"];
 const si = allPrefixes;
 const none: readonly string[] = [];
 
-type Options = Partial<Pick<UnitRow, "aliases" | "massParameter" | "convention">>;
+type Options = Partial<
+  Pick<UnitRow, "aliases" | "prefixedAliases" | "massParameter" | "convention">
+>;
 
 function row(
   symbol: string,
@@ -90,7 +97,7 @@ export const unitRows: readonly UnitRow[] = [
   row("V", "volt", potential, 1, si, brochure),
   row("F", "farad", dimension({ length: -2, mass: -1, time: 4, current: 2 }), 1, si, brochure),
   row("ohm", "ohm", dimension({ length: 2, mass: 1, time: -3, current: -2 }), 1, si, brochure, {
-    aliases: ["Ω", "Ω"],
+    aliases: ["Ω"],
   }),
   row("S", "siemens", dimension({ length: -2, mass: -1, time: 3, current: 2 }), 1, si, brochure),
   row("Wb", "weber", dimension({ length: 2, mass: 1, time: -2, current: -1 }), 1, si, brochure),
@@ -99,25 +106,18 @@ export const unitRows: readonly UnitRow[] = [
   row("lm", "lumen", dimension({ "luminous intensity": 1 }), 1, si, brochure),
   row("lx", "lux", dimension({ "luminous intensity": 1, length: -2 }), 1, si, brochure),
   row("Bq", "becquerel", frequency, 1, si, brochure),
-  row(
-    "Gy",
-    "gray",
-    dimension({ length: 2, time: -2 }),
-    1,
-    ["n", "u", "µ", "μ", "m", "c", "k"],
-    brochure,
-  ),
-  row("Sv", "sievert", dimension({ length: 2, time: -2 }), 1, ["n", "u", "µ", "μ", "m"], brochure),
+  row("Gy", "gray", dimension({ length: 2, time: -2 }), 1, ["n", "u", "m", "c", "k"], brochure),
+  row("Sv", "sievert", dimension({ length: 2, time: -2 }), 1, ["n", "u", "m"], brochure),
   row("kat", "katal", dimension({ amount: 1, time: -1 }), 1, si, brochure),
-  row("rad", "radian", dimensionless, 1, ["m", "u", "µ", "μ", "n"], brochure),
-  row("sr", "steradian", dimensionless, 1, ["m", "u", "µ", "μ"], brochure),
+  row("rad", "radian", dimensionless, 1, ["m", "u", "n"], brochure),
+  row("sr", "steradian", dimensionless, 1, ["m", "u"], brochure),
 
   row("erg", "erg", energy, 1e-7, ["k", "M"], sp811),
   row("dyn", "dyne", force, 1e-5, ["k", "M"], sp811, { aliases: ["dyne"] }),
   row("Ba", "barye", pressure, 0.1, none, sp811),
   row("P", "poise", dimension({ mass: 1, length: -1, time: -1 }), 0.1, ["c", "m"], sp811),
   row("St", "stokes", dimension({ length: 2, time: -1 }), 1e-4, ["c"], sp811),
-  row("Gal", "gal", dimension({ length: 1, time: -2 }), 0.01, ["m", "u", "µ", "μ"], sp811),
+  row("Gal", "gal", dimension({ length: 1, time: -2 }), 0.01, ["m", "u"], sp811),
 
   row("eV", "electronvolt", energy, 1.602176634e-19, si, brochure),
   row("u", "unified atomic mass unit", mass, Number.NaN, none, brochure),
@@ -154,49 +154,45 @@ export const unitRows: readonly UnitRow[] = [
     "parsec",
     length,
     (648000 / Math.PI) * 149597870700,
-    ["m", ...ngVlx],
+    ["m", ...large],
     "IAU 2015 Resolution B2",
   ),
-  row("ly", "light-year", length, 9460730472580800, ngVlx, iauStyle),
+  row("ly", "light-year", length, 9460730472580800, large, iauStyle),
   row("yr", "Julian year", time, 31557600, ["k", "M", "G"], iauStyle),
   row("day", "day", time, 86400, none, brochure, { aliases: ["days"] }),
   row("hr", "hour", time, 3600, none, brochure, { aliases: ["hour"] }),
   row("min", "minute", time, 60, none, brochure, { aliases: ["minute"] }),
-  row(
-    "Jy",
-    "jansky",
-    dimension({ mass: 1, time: -2 }),
-    1e-26,
-    ["n", "u", "µ", "μ", "m", "k", "M"],
-    iauStyle,
-  ),
+  row("Jy", "jansky", dimension({ mass: 1, time: -2 }), 1e-26, ["n", "u", "m", "k", "M"], iauStyle),
   row("angstrom", "ångström", length, 1e-10, none, sp811, { aliases: ["Å", "Angstrom"] }),
-  row("barn", "barn", area, 1e-28, ["m", "u", "µ", "μ", "n", "p", "f", "k", "M"], sp811),
+  row("barn", "barn", area, 1e-28, ["m", "u", "n", "p", "f", "k", "M"], sp811),
+  // A photon radiance: 10^10/(4 pi) photons per m^2, s and sr; photon and sr are pure numbers here.
   row(
     "rayleigh",
     "rayleigh",
     dimension({ length: -2, time: -1 }),
     1e10 / (4 * Math.PI),
     ["k"],
-    "Baker & Romick 1976, Applied Optics 15, 1966 (from memory)",
+    "Baker & Romick 1976, Applied Optics 15, 1966",
   ),
   row("atm", "standard atmosphere", pressure, 101325, none, sp811),
-  row("bar", "bar", pressure, 1e5, ["m", "u", "µ", "μ", "k", "M", "G"], sp811),
+  row("bar", "bar", pressure, 1e5, ["m", "u", "k", "M", "G"], sp811),
 
   row("deg", "degree", dimensionless, Math.PI / 180, none, brochure, { aliases: ["°"] }),
   row("arcmin", "minute of arc", dimensionless, Math.PI / 10800, none, brochure),
   row("arcsec", "second of arc", dimensionless, Math.PI / 648000, none, brochure),
   row("mas", "thousandth of a second of arc", dimensionless, Math.PI / 648e6, none, iauStyle),
-  row("uas", "millionth of a second of arc", dimensionless, Math.PI / 648e9, none, iauStyle, {
-    aliases: ["µas", "μas"],
-  }),
+  row("uas", "millionth of a second of arc", dimensionless, Math.PI / 648e9, none, iauStyle),
   row("rpm", "revolution per minute", frequency, 1 / 60, none, sp811),
   row("percent", "per cent", dimensionless, 0.01, none, brochure, { aliases: ["%"] }),
   row("ppm", "part per million", dimensionless, 1e-6, none, sp811),
 
-  row("gauss", "gauss", fluxDensity, 1e-4, wide, sp811, { convention: "si" }),
+  row("gauss", "gauss", fluxDensity, 1e-4, wide, sp811, {
+    convention: "si",
+    prefixedAliases: ["G"],
+  }),
   row("gauss", "gauss", gaussianField, gaussianFieldFactor, wide, sp811, {
     convention: "gaussian",
+    prefixedAliases: ["G"],
   }),
   row("esu", "electrostatic unit of charge", gaussianCharge, gaussianChargeFactor, none, sp811, {
     convention: "gaussian",
