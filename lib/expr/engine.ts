@@ -9,7 +9,7 @@ import { noticesOf } from "./notices";
 import { present } from "./present";
 import { refusedFunctions } from "./refused-functions";
 import { engineRelease } from "./release";
-import { type Resolved, type ResolvedCell, resolve } from "./resolve";
+import { type Resolved, type ResolvedCell, resolve, structureKey, withCellsOf } from "./resolve";
 import { Runtime } from "./runtime";
 import { type Meaning, makeScope, type Scope } from "./scope";
 import { tellFault } from "./sentences";
@@ -57,6 +57,8 @@ function formulaField(kind: string): string {
 class RememberingEngine implements Engine {
   readonly #formulas = new FormulaCache();
   readonly #kept = new Map<string, Kept>();
+  readonly #structures = new Map<string, number>();
+  #last: { key: string; resolved: Resolved } | undefined;
   #serial = 0;
 
   evaluate(file: CalculationFile, contentHash: string): Results {
@@ -77,26 +79,52 @@ class RememberingEngine implements Engine {
   }
 
   present(file: CalculationFile, results: Results): Presentation {
-    return present(file, results, resolve(file, this.#formulas), systemOf(file));
+    return present(file, results, this.#resolve(file), systemOf(file));
   }
 
   #start(file: CalculationFile): Run {
     const system = systemOf(file);
-    const resolved = resolve(file, this.#formulas);
+    const resolved = this.#resolve(file);
     const outcomes = new Map<string, Kept>();
     const scope = makeScope(system, (name) => meaningOf(name, resolved, outcomes));
     return { system, resolved, scope, runtime: new Runtime(), outcomes };
   }
 
   #outcome(one: ResolvedCell, run: Run): Kept {
-    const key = keyOf(one, run);
+    const key = this.#keyOf(one, run);
     const known = this.#kept.get(key);
     if (known) return known;
-    if (this.#kept.size >= mostKept) this.#kept.clear();
+    if (this.#kept.size >= mostKept) {
+      this.#kept.clear();
+      this.#structures.clear();
+      return this.#outcome(one, run);
+    }
     this.#serial += 1;
     const kept = { ...this.#evaluate(one, run), serial: this.#serial };
     this.#kept.set(key, kept);
     return kept;
+  }
+
+  /** What a cell is, its values, and which outcomes it rests on. */
+  #keyOf(one: ResolvedCell, run: Run): string {
+    const structure = `${run.system.edition}${run.system.em}${one.structure}`;
+    let serial = this.#structures.get(structure);
+    if (serial === undefined) {
+      serial = this.#structures.size;
+      this.#structures.set(structure, serial);
+    }
+    let key = `${serial}|${kindOf(one.cell).values(one.cell)}`;
+    for (const id of one.uses) key += `|${run.outcomes.get(id)?.serial ?? "?"}`;
+    return key;
+  }
+
+  /** Names and order, remembered for the structure that was evaluated last. */
+  #resolve(file: CalculationFile): Resolved {
+    const key = structureKey(file);
+    if (this.#last?.key === key) return withCellsOf(this.#last.resolved, file);
+    const resolved = resolve(file, this.#formulas);
+    this.#last = { key, resolved };
+    return resolved;
   }
 
   #evaluate(one: ResolvedCell, run: Run): Outcome {
@@ -116,21 +144,6 @@ class RememberingEngine implements Engine {
     if (notices.length === 0) return outcome.value;
     return { ...outcome.value, result: { ...outcome.value.result, notices } };
   }
-}
-
-function keyOf(one: ResolvedCell, run: Run): string {
-  const { cell } = one;
-  const { edition, em } = run.system;
-  const uses = one.uses.map((id) => run.outcomes.get(id)?.serial ?? "?").join();
-  // Names that the calculation does not define, but once did or will, change what a formula means.
-  const roles =
-    one.reading?.formulas
-      .map((formula) =>
-        formula.names.map((name) => (run.resolved.definers.has(name) ? 1 : 0)).join(""),
-      )
-      .join() ?? "";
-  const fault = one.fault ? JSON.stringify(one.fault.with ?? one.fault.reason) : "";
-  return [cell.kind, edition, em, uses, roles, fault, kindOf(cell).signature(cell)].join("\u0000");
 }
 
 function meaningOf(

@@ -12,6 +12,8 @@ export interface ResolvedCell {
   /** Ids of the cells it uses, in the order in which it names them. */
   readonly uses: readonly string[];
   readonly fault?: Fault;
+  /** Everything about it that its values, and those of what it uses, do not change. */
+  readonly structure: string;
 }
 
 /** A calculation whose names are known: cells in the order of evaluation. */
@@ -67,7 +69,7 @@ function rolesOf(declared: readonly Declared[]): Roles {
 
 function readOne(declared: Declared, roles: Roles, formulas: FormulaCache): ResolvedCell {
   const { cell, declaration, fault } = declared;
-  const base = { cell, uses: [], ...(declaration ? { declaration } : {}) };
+  const base = { cell, uses: [], structure: "", ...(declaration ? { declaration } : {}) };
   if (fault) return { ...base, fault };
   const reading = attempt(() => kindOf(cell).read(cell, roles, formulas));
   if (!reading.ok) return { ...base, fault: reading.fault };
@@ -82,7 +84,17 @@ function linked(read: ResolvedCell, definers: ReadonlyMap<string, string>): Reso
       if (definer !== undefined) uses.add(definer);
     }
   }
-  return { ...read, uses: [...uses] };
+  return { ...read, uses: [...uses], structure: structureOf(read, definers) };
+}
+
+/** What a cell is, which of its names the calculation defines, and its fault, as one text. */
+function structureOf(read: ResolvedCell, definers: ReadonlyMap<string, string>): string {
+  const { cell, reading, fault } = read;
+  const defined = (reading?.formulas ?? []).map((formula) =>
+    formula.names.map((name) => (definers.has(name) ? 1 : 0)).join(""),
+  );
+  const told = fault ? JSON.stringify([fault.reason, fault.with]) : "";
+  return [cell.kind, defined.join(), told, kindOf(cell).structure(cell)].join("\u0000");
 }
 
 /** Cells in an order in which each comes behind what it uses; members of a cycle get its fault. */
@@ -104,10 +116,15 @@ function inOrder(cells: readonly ResolvedCell[]): ResolvedCell[] {
     path.pop();
     state.set(id, "done");
     const fault = cyclic.get(id);
-    order.push(fault && !one.fault ? { ...one, fault } : one);
+    const faulty = fault && !one.fault;
+    order.push(faulty ? { ...one, fault, structure: `${one.structure}${names(fault)}` } : one);
   };
   for (const one of cells) if (!state.has(one.cell.id)) visit(one);
   return order;
+}
+
+function names(cycle: Fault): string {
+  return `\u0000${String(cycle.with?.members)}`;
 }
 
 function markCycle(
@@ -120,6 +137,21 @@ function markCycle(
   for (const id of members) {
     cyclic.set(id, { code: "cycle", reason: "cycle", with: { members: names } });
   }
+}
+
+/** The text on which the resolution of a calculation depends: what cells are, not their values. */
+export function structureKey(file: CalculationFile): string {
+  const parts = file.cells.map(
+    (cell) => `${cell.id}\u0001${cell.kind}\u0001${kindOf(cell).structure(cell)}`,
+  );
+  return [file.edition, file.em, ...parts].join("\u0002");
+}
+
+/** The same resolution for a file of the same structure, with the cells of that file in it. */
+export function withCellsOf(resolved: Resolved, file: CalculationFile): Resolved {
+  const byId = new Map(file.cells.map((cell) => [cell.id, cell]));
+  const order = resolved.order.map((one) => ({ ...one, cell: byId.get(one.cell.id) ?? one.cell }));
+  return { ...resolved, order };
 }
 
 /** Names and order of a calculation. Every fault stays with its cell; nothing is raised. */

@@ -39,7 +39,8 @@ export const checkKind: KindOfCell<CheckCell> = {
     refuseHeadAndUnit(formulas.words(cell.condition));
     return { formulas: [formulas.read(cell.condition, roles)] };
   },
-  signature: (cell) => cell.condition,
+  structure: (cell) => cell.condition,
+  values: () => "",
   evaluate: (_cell, reading, context) => {
     const formula = reading.formulas[0] as Formula;
     const settled = context.formulas.settle(formula, context.scope, "condition");

@@ -46,16 +46,11 @@ export const givenKind: KindOfCell<GivenCell> = {
   kind: "given",
   declare: (cell) => ({ symbol: requireSymbol(cell.symbol), isFunction: false }),
   read: () => ({ formulas: [] }),
-  signature: (cell) =>
-    [
-      cell.symbol,
-      cell.value,
-      cell.unit,
-      cell.uncertainty,
-      cell.interval?.join(),
-      cell.dex,
-      cell.factor,
-    ].join("\u0000"),
+  structure: (cell) => cell.symbol,
+  values: (cell) =>
+    [cell.value, cell.unit, cell.uncertainty, cell.interval?.join(), cell.dex, cell.factor].join(
+      "\u0000",
+    ),
   evaluate: (cell, _reading, context) => {
     requireSoundUncertainty(cell);
     const unit = requireUnit(cell.unit ?? "", context.system, "unit");

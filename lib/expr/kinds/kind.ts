@@ -48,8 +48,10 @@ export interface KindOfCell<C extends Cell = Cell> {
   declare(cell: C, formulas: FormulaCache): Declaration | undefined;
   /** Its formulas, read. Raises what reading raises. */
   read(cell: C, roles: Roles, formulas: FormulaCache): Reading;
-  /** The text that decides its outcome beside what it depends on. */
-  signature(cell: C): string;
+  /** The text that decides what it defines and what it rests on. */
+  structure(cell: C): string;
+  /** The rest of what decides its outcome: values that may change while the structure stays. */
+  values(cell: C): string;
   /** Its outcome. Raises what evaluation raises. */
   evaluate(cell: C, reading: Reading, context: EvaluationContext): Outcome;
 }

@@ -128,7 +128,8 @@ export const relationKind: KindOfCell<RelationCell> = {
     const { parameters } = relationHead(cell, formulas.words(cell.formula));
     return { formulas: [formulas.read(cell.formula, roles, parameters)] };
   },
-  signature: (cell) => [cell.symbol, cell.formula, cell.unit].join("\u0000"),
+  structure: (cell) => [cell.symbol, cell.formula, cell.unit].join("\u0000"),
+  values: () => "",
   evaluate: (cell, reading, context) => {
     const formula = reading.formulas[0] as Formula;
     const head = relationHead(cell, formula.words);

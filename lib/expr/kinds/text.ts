@@ -6,6 +6,7 @@ export const textKind: KindOfCell<TextCell> = {
   kind: "text",
   declare: () => undefined,
   read: () => ({ formulas: [] }),
-  signature: () => "",
+  structure: () => "",
+  values: () => "",
   evaluate: () => ({ result: { kind: "text", status: "ok" } }),
 };
