@@ -1,6 +1,6 @@
 "use client";
 
-import { cellLine } from "@/lib/expr/entry";
+import { useRef } from "react";
 import type { Cell } from "@/lib/schema";
 import { replaceCell } from "./edit-file";
 import { useFolio } from "./folio-context";
@@ -26,10 +26,13 @@ const kinds = ["given", "relation", "check", "text"] as const;
 export function CellDetails({ cell }: { cell: Cell }) {
   const { state, edit } = useFolio();
   const system = systemOf(state.file);
+  const hasTyped = useRef<Detail>(undefined);
   const set = (field: Detail, value: string) => {
     const { [field]: _old, ...rest } = cell as Record<string, unknown>;
     const next = (value === "" ? rest : { ...rest, [field]: value }) as Cell;
-    edit(replaceCell(state.file, next), true);
+    // One visit to a field is one step of undo.
+    edit(replaceCell(state.file, next), hasTyped.current === field);
+    hasTyped.current = field;
   };
   return (
     <div className="cell-details">
@@ -50,7 +53,7 @@ export function CellDetails({ cell }: { cell: Cell }) {
           value={cell.kind}
           onChange={(event) => {
             const kind = kinds.find((one) => one === event.target.value);
-            if (kind && cellLine(cell) !== undefined)
+            if (kind && kind !== cell.kind)
               edit(replaceCell(state.file, asKind(cell, kind, system)));
           }}
         >

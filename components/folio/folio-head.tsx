@@ -1,7 +1,8 @@
 "use client";
 
-import { useState } from "react";
+import { useRef, useState } from "react";
 import { Prose } from "@/components/typeset/prose";
+import { Button } from "@/components/ui/button";
 import type { CalculationFile } from "@/lib/schema";
 import { limits } from "@/lib/schema/limits";
 
@@ -15,9 +16,24 @@ interface HeadProps {
   readonly edit: (file: CalculationFile, quiet?: boolean) => void;
 }
 
+/** One visit to a field is one step of undo: the first change is a step, those after join it. */
+function useVisit() {
+  const hasTyped = useRef(false);
+  return {
+    begin: () => {
+      hasTyped.current = false;
+    },
+    isLater: () => {
+      const later = hasTyped.current;
+      hasTyped.current = true;
+      return later;
+    },
+  };
+}
+
 /** Title, abstract, constants edition and electromagnetic convention of the draft. */
 export function FolioHead({ file, edit }: HeadProps) {
-  const [writing, setWriting] = useState(false);
+  const visit = useVisit();
   return (
     <header className="folio-head">
       <h1 className="sr-only">{file.title || "Untitled calculation"}</h1>
@@ -27,36 +43,12 @@ export function FolioHead({ file, edit }: HeadProps) {
         maxLength={limits.titleLength}
         placeholder="Title"
         value={file.title}
+        onFocus={visit.begin}
         onChange={(event) =>
-          edit({ ...file, title: event.target.value.replace(/\p{Cc}/gu, " ") }, true)
+          edit({ ...file, title: event.target.value.replace(/\p{Cc}/gu, " ") }, visit.isLater())
         }
       />
-      {writing ? (
-        <textarea
-          // biome-ignore lint/a11y/noAutofocus: the person has just asked to edit the abstract.
-          autoFocus
-          aria-label="Abstract, CommonMark with $…$"
-          className="prose-editor"
-          rows={4}
-          value={file.abstract ?? ""}
-          onChange={(event) => edit({ ...file, abstract: event.target.value }, true)}
-          onBlur={() => setWriting(false)}
-          onKeyDown={(event) => event.key === "Escape" && setWriting(false)}
-        />
-      ) : (
-        <button
-          type="button"
-          className="folio-abstract"
-          onClick={() => setWriting(true)}
-          aria-label="Edit the abstract"
-        >
-          {file.abstract ? (
-            <Prose markdown={file.abstract} />
-          ) : (
-            <span className="text-faint italic">Abstract</span>
-          )}
-        </button>
-      )}
+      <Abstract file={file} edit={edit} />
       <div className="flex flex-wrap gap-x-6 gap-y-1 font-sans text-sm">
         <label>
           Constants{" "}
@@ -87,5 +79,43 @@ export function FolioHead({ file, edit }: HeadProps) {
         </label>
       </div>
     </header>
+  );
+}
+
+function Abstract({ file, edit }: HeadProps) {
+  const [writing, setWriting] = useState(false);
+  const visit = useVisit();
+  const change = (text: string) => {
+    const { abstract: _before, ...rest } = file;
+    edit(text === "" ? rest : { ...rest, abstract: text }, visit.isLater());
+  };
+  if (!writing) {
+    return (
+      <div className="folio-abstract">
+        {file.abstract && <Prose markdown={file.abstract} />}
+        <Button
+          look="quiet"
+          onClick={() => {
+            visit.begin();
+            setWriting(true);
+          }}
+        >
+          {file.abstract ? "edit the abstract" : "write an abstract"}
+        </Button>
+      </div>
+    );
+  }
+  return (
+    <textarea
+      // biome-ignore lint/a11y/noAutofocus: the person has just asked to edit the abstract.
+      autoFocus
+      aria-label="Abstract, CommonMark with $…$"
+      className="prose-editor"
+      rows={4}
+      value={file.abstract ?? ""}
+      onChange={(event) => change(event.target.value)}
+      onBlur={() => setWriting(false)}
+      onKeyDown={(event) => event.key === "Escape" && setWriting(false)}
+    />
   );
 }

@@ -20,7 +20,9 @@ export interface FolioState {
   readonly current: string | null;
   /** The cell whose source line is open. */
   readonly open: string | null;
-  /** A line being typed that its cell cannot hold yet, such as `L =`. */
+  /** The cell below which a new one is being written; null for the last line only. */
+  readonly writingBelow: string | null;
+  /** Lines that no cell can hold yet, such as `L =`, by cell; new ones by `newLineKey`. */
   readonly pending: Readonly<Record<string, string>>;
   /** Cells that both sides changed; saving waits until they are settled. */
   readonly conflicts: readonly Conflict[];
@@ -32,6 +34,7 @@ export type FolioAction =
   | { readonly type: "pend"; readonly id: string; readonly line: string | undefined }
   | { readonly type: "hold"; readonly id: string | null }
   | { readonly type: "open"; readonly id: string | null }
+  | { readonly type: "write"; readonly below: string | null }
   | { readonly type: "undo" }
   | { readonly type: "redo" }
   | { readonly type: "saved"; readonly base: Base }
@@ -48,6 +51,11 @@ export type FolioAction =
 
 const mostSteps = 200;
 
+/** Where an unfinished new line is kept; no cell id begins with a plus sign. */
+export function newLineKey(below: string | null): string {
+  return `+${below ?? ""}`;
+}
+
 export function startFolio(draft: Draft): FolioState {
   return {
     file: draft.file,
@@ -56,6 +64,7 @@ export function startFolio(draft: Draft): FolioState {
     future: [],
     current: null,
     open: null,
+    writingBelow: null,
     pending: {},
     conflicts: [],
   };
@@ -77,14 +86,46 @@ function stepped(state: FolioState, from: "past" | "future"): FolioState {
     : { ...state, file, future: rest, past: [...state.past, state.file], open: null, pending: {} };
 }
 
-function merged(
+/** Ids of one's own new cells change where somebody else's new cell has the same. */
+function renameIn(state: FolioState, renamed: Readonly<Record<string, string>>): FolioState {
+  const now = (id: string | null) => (id === null ? null : (renamed[id] ?? id));
+  const pending = Object.entries(state.pending).map(([id, line]) => [renamed[id] ?? id, line]);
+  return {
+    ...state,
+    current: now(state.current),
+    open: now(state.open),
+    writingBelow: now(state.writingBelow),
+    pending: Object.fromEntries(pending),
+  };
+}
+
+/** Theirs merged into ours, and into the steps to undo, so that undoing keeps what others did. */
+function joined(state: FolioState, theirs: Base): FolioState {
+  const from = state.base.file;
+  const join = (mine: CalculationFile) => merge(from, mine, theirs.file).file;
+  const { file, conflicts, renamed } = merge(from, state.file, theirs.file);
+  return {
+    ...renameIn(state, renamed),
+    file,
+    base: theirs,
+    conflicts,
+    past: state.past.map(join),
+    future: state.future.map(join),
+  };
+}
+
+/** Work that was left in this browser merged into what is here; undoing sets it aside. */
+function restored(
   state: FolioState,
-  mine: CalculationFile,
-  from: CalculationFile,
-  theirs: Base,
+  left: { base: CalculationFile; file: CalculationFile; pending: FolioState["pending"] },
 ): FolioState {
-  const { file, conflicts } = merge(from, mine, theirs.file);
-  return { ...state, file, base: theirs, conflicts };
+  const { file, conflicts } = merge(left.base, left.file, state.file);
+  const next = edited(state, file, false);
+  return {
+    ...next,
+    conflicts: [...state.conflicts, ...conflicts],
+    pending: { ...left.pending, ...state.pending },
+  };
 }
 
 function pended(state: FolioState, id: string, line: string | undefined): FolioState {
@@ -103,6 +144,8 @@ export function folioReducer(state: FolioState, action: FolioAction): FolioState
       return { ...state, current: action.id };
     case "open":
       return { ...state, open: action.id, current: action.id ?? state.current };
+    case "write":
+      return { ...state, writingBelow: action.below };
     case "undo":
       return stepped(state, "past");
     case "redo":
@@ -111,12 +154,10 @@ export function folioReducer(state: FolioState, action: FolioAction): FolioState
       return { ...state, base: action.base };
     case "stale": {
       const { file, revision, savedAt } = action.theirs;
-      return merged(state, state.file, state.base.file, { file, revision, savedAt });
+      return joined(state, { file, revision, savedAt });
     }
-    case "restored": {
-      const next = merged(state, action.file, action.base, state.base);
-      return { ...next, pending: { ...action.pending, ...state.pending } };
-    }
+    case "restored":
+      return restored(state, action);
     case "settled":
       return {
         ...state,

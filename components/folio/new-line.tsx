@@ -1,54 +1,61 @@
 "use client";
 
-import { forwardRef, useState } from "react";
-import { kindNames } from "@/components/typeset/cell-body";
+import { useEffect, useRef } from "react";
 import type { CalculationFile } from "@/lib/schema";
+import { useFolio } from "./folio-context";
+import { newLineKey } from "./folio-state";
 import { newCell, systemOf } from "./line-edit";
 
-/** The empty last line: what is typed here becomes a given, a relation, a check or text. */
-export const NewLine = forwardRef<
-  HTMLTextAreaElement,
-  {
-    file: CalculationFile;
-    below: string | null;
-    onWrite: (line: string) => void;
-    onLeave: () => void;
-  }
->(function NewLine({ file, below, onWrite, onLeave }, ref) {
-  const [line, setLine] = useState("");
+interface NewLineProps {
+  readonly file: CalculationFile;
+  /** The cell that the new one is put below; null for the last line. */
+  readonly below: string | null;
+  readonly onWrite: (line: string, below: string | null) => void;
+  readonly onLeave: () => void;
+}
+
+/** The last line's field, for those that bring the caret there. */
+export const lastLineId = "new-line";
+
+/** An empty line: what is typed here becomes a given, a relation, a check or text. */
+export function NewLine({ file, below, onWrite, onLeave }: NewLineProps) {
+  const { state, dispatch } = useFolio();
+  const key = newLineKey(below);
+  const line = state.pending[key] ?? "";
   const made = newCell(line, "new", systemOf(file));
-  const write = () => {
-    if (!made) return;
-    onWrite(line);
-    setLine("");
-  };
+  const field = useRef<HTMLTextAreaElement>(null);
+  useEffect(() => {
+    if (below !== null) field.current?.focus();
+  }, [below]);
+  const type = (next: string) =>
+    dispatch({ type: "pend", id: key, line: next === "" ? undefined : next });
+  const id = below === null ? lastLineId : `${lastLineId}-${below}`;
   return (
     <div className="new-line">
-      <label className="sr-only" htmlFor="new-line">
-        {below === null ? "New cell" : "New cell below the one in hand"}
+      <label className="sr-only" htmlFor={id}>
+        {below === null ? "New cell at the end" : "New cell here"}
       </label>
       <textarea
-        id="new-line"
-        ref={ref}
+        id={id}
+        ref={field}
         rows={Math.max(1, line.split("\n").length)}
         value={line}
         placeholder="M = 10 Msun,  L = 4 pi G M m_p c / sigma_T,  L > 1e38 erg/s,  or text"
+        aria-describedby={`${id}-makes`}
         spellCheck={false}
-        onChange={(event) => setLine(event.target.value)}
+        onChange={(event) => type(event.target.value)}
         onKeyDown={(event) => {
           event.stopPropagation();
-          if (event.key === "Enter" && !event.shiftKey) {
+          if (event.key === "Enter" && !event.shiftKey && !event.nativeEvent.isComposing) {
             event.preventDefault();
-            write();
+            if (made) onWrite(line, below);
           }
           if (event.key === "Escape") onLeave();
         }}
       />
-      <p className="text-xs text-faint" aria-live="polite">
-        {made
-          ? `Enter makes this a ${kindNames[made.kind]}.`
-          : "A line makes a cell; Enter finishes it."}
+      <p id={`${id}-makes`} className="new-line-makes">
+        {made ? `Enter makes this a ${made.kind}.` : "A line makes a cell; Enter finishes it."}
       </p>
     </div>
   );
-});
+}

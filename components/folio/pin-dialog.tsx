@@ -1,122 +1,77 @@
 "use client";
 
 import { useState } from "react";
-import { Button } from "@/components/ui/button";
 import { CopyButton } from "@/components/ui/copy-button";
 import { Dialog } from "@/components/ui/dialog";
-import { Field } from "@/components/ui/field";
-import { Message } from "@/components/ui/message";
-import type { EvaluateAnswer, Visibility } from "@/lib/schema";
-import { pinDraft, tellProblem } from "./folio-api";
+import type { CalculationFile, Draft, EvaluateAnswer, Visibility } from "@/lib/schema";
+import { pinDraft, type Sent, tellProblem } from "./folio-api";
+import { PinForm } from "./pin-form";
 
 interface PinDialogProps {
   readonly id: string;
   readonly open: boolean;
   readonly visibility: Visibility;
+  readonly file: CalculationFile;
   readonly answer: EvaluateAnswer;
   readonly flush: () => Promise<boolean>;
-  readonly onPinned: (version: number) => void;
+  readonly onPinned: (version: Draft["versions"][number]) => void;
   readonly onClose: () => void;
 }
 
-const audience: Record<Visibility, string> = {
+interface Pinned {
+  readonly version: number;
+  readonly url: string;
+}
+
+const unsaved =
+  "The draft is not saved yet. Look at the line above the calculation, then pin again.";
+
+/** Who can read a pinned version, said before and after the act. */
+export const audience: Record<Visibility, string> = {
   private: "Only you can read it, until you open the calculation to others.",
-  link: "Everybody who has the link will be able to read it.",
-  public: "Everybody will be able to read and find it.",
+  link: "Everybody who has the link can read it, now and later.",
+  public: "Everybody can find and read it, now and later.",
 };
 
 /** Pinning: an act with a summary, after which the version never changes. */
 export function PinDialog(props: PinDialogProps) {
-  const { id, answer, flush } = props;
-  const [summary, setSummary] = useState("");
-  const [accepts, setAccepts] = useState(false);
-  const [trouble, setTrouble] = useState<string>();
-  const [busy, setBusy] = useState(false);
-  const [pinned, setPinned] = useState<{ version: number; url: string }>();
-  const faulty = Object.values(answer.cells).filter((cell) => cell.status === "error").length;
-
-  const pin = async () => {
-    setBusy(true);
-    setTrouble(undefined);
-    const isSaved = await flush();
-    const sent = isSaved
-      ? await pinDraft(id, { summary, ...(accepts ? { acceptErrors: true } : {}) })
-      : undefined;
-    setBusy(false);
-    if (!sent)
-      return setTrouble(
-        "The draft is not saved yet. Look at the line above the calculation, then pin again.",
-      );
-    if (!sent.ok) return setTrouble(tellProblem(sent.problem));
-    setPinned({ version: sent.value.version, url: new URL(sent.value.url, location.href).href });
-    props.onPinned(sent.value.version);
+  const { id, open, visibility, file, answer, flush, onPinned, onClose } = props;
+  const [pinned, setPinned] = useState<Pinned>();
+  const pin = async (summary: string, acceptErrors: boolean): Promise<string | undefined> => {
+    if (!(await flush())) return unsaved;
+    const sent: Sent<Pinned> = await pinDraft(id, {
+      summary,
+      ...(acceptErrors ? { acceptErrors } : {}),
+    });
+    if (!sent.ok) return tellProblem(sent.problem);
+    const { version, url } = sent.value;
+    setPinned({ version, url: new URL(url, location.href).href });
+    onPinned({ number: version, summary, pinnedAt: new Date().toISOString(), withdrawn: false });
+    return undefined;
   };
   const close = () => {
     setPinned(undefined);
-    setSummary("");
-    setAccepts(false);
-    props.onClose();
+    onClose();
   };
-
   return (
     <Dialog
-      title={pinned ? `Version ${pinned.version} is pinned` : "Pin a version"}
-      open={props.open}
+      title={pinned ? `v${pinned.version} is pinned` : "Pin a version"}
+      open={open}
       onClose={close}
     >
       {pinned ? (
         <div className="space-y-3 font-sans text-sm">
-          <p>Its page will always show these numbers:</p>
+          <p>Its page always shows these numbers:</p>
           <p className="break-all">
-            <a className="text-calcium underline" href={pinned.url}>
+            <a className="link" href={pinned.url}>
               {pinned.url}
             </a>{" "}
-            <CopyButton text={pinned.url} label="copy the link" />
+            <CopyButton text={pinned.url} label="copy link" what={`to v${pinned.version}`} />
           </p>
-          <p>{audience[props.visibility]}</p>
+          <p>{audience[visibility]}</p>
         </div>
       ) : (
-        <form
-          className="space-y-4 font-sans text-sm"
-          onSubmit={(event) => {
-            event.preventDefault();
-            void pin();
-          }}
-        >
-          <p>
-            A version keeps the calculation and its results as they are now, for good. It can be
-            withdrawn with a reason, but not changed or deleted. {audience[props.visibility]}
-          </p>
-          <Field
-            label="Summary"
-            hint="What this version is, in a line."
-            value={summary}
-            maxLength={500}
-            required
-            onChange={(event) => setSummary(event.target.value)}
-          />
-          {faulty > 0 && (
-            <Message tone="error">
-              {faulty === 1 ? "One cell has an error." : `${faulty} cells have errors.`}{" "}
-              <label className="mt-1 flex gap-2">
-                <input
-                  type="checkbox"
-                  checked={accepts}
-                  onChange={(event) => setAccepts(event.target.checked)}
-                />
-                Pin it all the same; readers will see the errors.
-              </label>
-            </Message>
-          )}
-          {trouble && <Message tone="error">{trouble}</Message>}
-          <Button
-            look="primary"
-            type="submit"
-            disabled={busy || summary.trim() === "" || (faulty > 0 && !accepts)}
-          >
-            {busy ? "Pinning…" : "Pin this version"}
-          </Button>
-        </form>
+        <PinForm file={file} answer={answer} visibility={visibility} onPin={pin} />
       )}
     </Dialog>
   );

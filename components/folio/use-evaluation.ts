@@ -6,13 +6,21 @@ import { evaluateFile, tellProblem } from "./folio-api";
 
 /** Keystrokes closer together than this are evaluated once. */
 const debounceMs = 150;
+/** After a failure, it is tried again by itself. */
+const retryMs = 4_000;
 
 export interface Evaluation {
   readonly answer: EvaluateAnswer;
-  /** True while what is shown is older than what is typed. */
-  readonly waiting: boolean;
+  /** The file that the answer is of: older than what is typed while an answer is waited for. */
+  readonly evaluated: CalculationFile;
   /** Why there is no newer answer, if there should be one. */
   readonly trouble: string | undefined;
+}
+
+/** A mark that keeps its latest moment only, so that a long session does not pile them up. */
+export function markMoment(name: "lo:keystroke" | "lo:painted"): void {
+  performance.clearMarks(name);
+  performance.mark(name);
 }
 
 function afterPaint(work: () => void): void {
@@ -21,31 +29,35 @@ function afterPaint(work: () => void): void {
 
 /** The results of the file, asked of the server as it changes; old ones stay until new ones come. */
 export function useEvaluation(file: CalculationFile, first: EvaluateAnswer): Evaluation {
-  const [answer, setAnswer] = useState(first);
-  const [evaluated, setEvaluated] = useState(file);
+  const [current, setCurrent] = useState({ answer: first, evaluated: file });
   const [trouble, setTrouble] = useState<string>();
-  const start = useRef(file);
+  const [tries, setTries] = useState(0);
+  const latest = useRef(file);
 
   useEffect(() => {
-    if (file === start.current) return;
+    if (file === latest.current && tries === 0) return;
+    latest.current = file;
     const controller = new AbortController();
-    performance.mark("lo:keystroke");
+    let retry: ReturnType<typeof setTimeout> | undefined;
     const ask = async () => {
-      performance.mark("lo:asked");
       const sent = await evaluateFile(file, controller.signal).catch(() => undefined);
       if (!sent || controller.signal.aborted) return;
-      if (!sent.ok) return setTrouble(tellProblem(sent.problem));
+      if (!sent.ok) {
+        setTrouble(tellProblem(sent.problem));
+        retry = setTimeout(() => setTries((count) => count + 1), retryMs);
+        return;
+      }
       setTrouble(undefined);
-      setAnswer(sent.value);
-      setEvaluated(file);
-      afterPaint(() => performance.mark("lo:painted"));
+      setCurrent({ answer: sent.value, evaluated: file });
+      afterPaint(() => markMoment("lo:painted"));
     };
     const timer = setTimeout(ask, debounceMs);
     return () => {
       clearTimeout(timer);
+      clearTimeout(retry);
       controller.abort();
     };
-  }, [file]);
+  }, [file, tries]);
 
-  return { answer, waiting: evaluated !== file, trouble };
+  return { ...current, trouble };
 }

@@ -21,6 +21,8 @@ export interface JournalState {
   readonly restored: boolean;
   /** False where the browser cannot keep anything. */
   readonly keeping: boolean;
+  /** The person has seen that work came back. */
+  readonly dismiss: () => void;
 }
 
 /** Keeps unsaved work in this browser until the server has confirmed it, and brings it back. */
@@ -41,27 +43,20 @@ export function useJournal(
     setReady(true);
   }, [id, dispatch]);
 
+  const { file, base, pending } = state;
   useEffect(() => {
     if (!ready) return;
-    const unsaved =
-      !sameValue(state.file, state.base.file) || Object.keys(state.pending).length > 0;
+    const unsaved = !sameValue(file, base.file) || Object.keys(pending).length > 0;
     if (!unsaved) return forgetWork(localStorage, id, tabName());
-    const { file, pending } = state;
     const keep = () => {
-      setKeeping(
-        keepWork(localStorage, id, tabName(), {
-          base: state.base.file,
-          file,
-          pending,
-          at: Date.now(),
-        }),
-      );
+      const entry = { base: base.file, file, pending, at: Date.now() };
+      setKeeping(keepWork(localStorage, id, tabName(), entry));
     };
     keep();
     // The time of the entry tells other tabs that this one is alive.
     const timer = setInterval(keep, heartbeatMs);
     return () => clearInterval(timer);
-  }, [id, state, ready]);
+  }, [id, file, base, pending, ready]);
 
-  return { restored, keeping };
+  return { restored, keeping, dismiss: () => setRestored(false) };
 }

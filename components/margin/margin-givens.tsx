@@ -1,6 +1,6 @@
 "use client";
 
-import { useState } from "react";
+import { useRef, useState } from "react";
 import { replaceCell } from "@/components/folio/edit-file";
 import { useFolio } from "@/components/folio/folio-context";
 import { finishLine, systemOf } from "@/components/folio/line-edit";
@@ -8,20 +8,34 @@ import { Tex } from "@/components/typeset/tex";
 import { cellLine } from "@/lib/expr/entry";
 import type { GivenCell } from "@/lib/schema";
 
-function valueOf(cell: GivenCell): string {
-  return cellLine(cell).slice(cell.symbol.length + 3);
+/** The line of a given behind its `=`. */
+function behindSign(line: string): string {
+  return line.replace(/^[^=]*=\s?/, "");
 }
 
 function GivenRow({ cell }: { cell: GivenCell }) {
   const { state, answer, edit, dispatch } = useFolio();
-  const [typed, setTyped] = useState<string>();
+  // The value as typed stands for the cell it made; if the cell changes otherwise, its own is shown.
+  const [typed, setTyped] = useState<{ value: string; made: GivenCell }>();
+  const hasTyped = useRef(false);
   const shown = answer.presentation?.cells[cell.id];
-  const isFaulty = answer.cells[cell.id]?.status === "error";
-  const change = (value: string) => {
-    setTyped(value);
-    const next = finishLine(cell, `${cell.symbol} = ${value}`, systemOf(state.file));
-    // A value that is not one yet stays in this field only.
-    if (next.kind === "given") edit(replaceCell(state.file, next), typed !== undefined);
+  const pending = state.pending[cell.id];
+  const isFaulty = answer.cells[cell.id]?.status === "error" || pending !== undefined;
+  const value =
+    pending === undefined
+      ? typed?.made === cell
+        ? typed.value
+        : behindSign(cellLine(cell))
+      : behindSign(pending);
+  const change = (next: string) => {
+    const line = `${cell.symbol} = ${next}`;
+    const made = finishLine(cell, line, systemOf(state.file));
+    // What is not a value yet waits with the cell, as in its source line.
+    if (made.kind !== "given") return dispatch({ type: "pend", id: cell.id, line });
+    if (pending !== undefined) dispatch({ type: "pend", id: cell.id, line: undefined });
+    setTyped({ value: next, made });
+    edit(replaceCell(state.file, made), hasTyped.current);
+    hasTyped.current = true;
   };
   return (
     <li className="grid grid-cols-[minmax(3rem,auto)_1fr] items-baseline gap-x-3 py-0.5">
@@ -36,10 +50,11 @@ function GivenRow({ cell }: { cell: GivenCell }) {
         aria-label={`value of ${cell.symbol}`}
         aria-invalid={isFaulty || undefined}
         className={`min-w-0 border-b bg-transparent px-1 font-mono text-sm ${isFaulty ? "border-halpha" : "border-rule"}`}
-        value={typed ?? valueOf(cell)}
+        value={value}
+        onFocus={() => {
+          hasTyped.current = false;
+        }}
         onChange={(event) => change(event.target.value)}
-        onBlur={() => setTyped(undefined)}
-        onKeyDown={(event) => event.key === "Enter" && event.currentTarget.blur()}
       />
     </li>
   );
