@@ -1,4 +1,4 @@
-import { type Problem, problemSchema } from "@/lib/schema";
+import type { Problem } from "@/lib/schema";
 
 /** What became of a request: its answer, or the problem that the server told. */
 export type Answer<T> =
@@ -13,11 +13,15 @@ const unreachable: Problem = {
   detail: "The server cannot be reached. Look at the connection and try again.",
 };
 
+/** True for problem details (RFC 9457); light, since the schema library is not sent to browsers. */
+function isProblem(body: unknown): body is Problem {
+  return typeof body === "object" && body !== null && "type" in body && "title" in body;
+}
+
 async function readAnswer<T>(response: Response): Promise<Answer<T>> {
   const body: unknown = await response.json().catch(() => undefined);
   if (response.ok) return { ok: true, value: body as T };
-  const problem = problemSchema.safeParse(body);
-  return { ok: false, problem: problem.success ? problem.data : unreachable };
+  return { ok: false, problem: isProblem(body) ? body : unreachable };
 }
 
 /** Send JSON to the API. Never throws: a connection that fails is a problem like others. */
@@ -27,9 +31,9 @@ export async function sendJson<T>(
   body?: unknown,
   signal?: AbortSignal,
 ): Promise<Answer<T>> {
+  const headers = { "content-type": "application/json" };
   const sent = body === undefined ? {} : { body: JSON.stringify(body) };
   try {
-    const headers = { "content-type": "application/json" };
     return await readAnswer(
       await fetch(path, { method, headers, signal: signal ?? null, ...sent }),
     );
