@@ -3,6 +3,7 @@ import type { CalculationFile } from "../schema/calculation";
 import type { Presentation } from "../schema/presentation";
 import { type CellResult, type Notice, type Results, resultsFormat } from "../schema/results";
 import { attempt, type Fault } from "./faults";
+import type { Formula } from "./formula";
 import { FormulaCache } from "./formula-cache";
 import { failure, kindOf, type Outcome } from "./kinds";
 import { noticesOf } from "./notices";
@@ -29,6 +30,8 @@ interface Run {
   readonly resolved: Resolved;
   readonly scope: Scope;
   readonly runtime: Runtime;
+  /** Formulas of relations, by the symbol they define. */
+  readonly formulas: ReadonlyMap<string, Formula>;
   /** Outcomes so far, by cell id. */
   readonly outcomes: Map<string, Kept>;
 }
@@ -87,7 +90,8 @@ class RememberingEngine implements Engine {
     const resolved = this.#resolve(file);
     const outcomes = new Map<string, Kept>();
     const scope = makeScope(system, (name) => meaningOf(name, resolved, outcomes));
-    return { system, resolved, scope, runtime: new Runtime(), outcomes };
+    const formulas = formulasBySymbol(resolved);
+    return { system, resolved, scope, runtime: new Runtime(), formulas, outcomes };
   }
 
   #outcome(one: ResolvedCell, run: Run): Kept {
@@ -138,12 +142,23 @@ class RememberingEngine implements Engine {
       formulas: this.#formulas,
       runtime: run.runtime,
       value: (key: InputKey) => inputValue(key, run),
+      formulaOf: (symbol: string) => run.formulas.get(symbol),
     };
     const outcome = attempt(() => kindOf(cell).evaluate(cell, reading, context));
     if (!outcome.ok) return failed(one, outcome.fault, notices, run);
     if (notices.length === 0) return outcome.value;
     return { ...outcome.value, result: { ...outcome.value.result, notices } };
   }
+}
+
+function formulasBySymbol(resolved: Resolved): Map<string, Formula> {
+  const formulas = new Map<string, Formula>();
+  for (const { declaration, reading } of resolved.order) {
+    const formula = reading?.formulas[0];
+    if (declaration && formula && !declaration.isFunction)
+      formulas.set(declaration.symbol, formula);
+  }
+  return formulas;
 }
 
 function meaningOf(

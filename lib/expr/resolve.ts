@@ -78,11 +78,10 @@ function readOne(declared: Declared, roles: Roles, formulas: FormulaCache): Reso
 
 function linked(read: ResolvedCell, definers: ReadonlyMap<string, string>): ResolvedCell {
   const uses = new Set<string>();
-  for (const formula of read.reading?.formulas ?? []) {
-    for (const name of formula.names) {
-      const definer = definers.get(name);
-      if (definer !== undefined) uses.add(definer);
-    }
+  const names = (read.reading?.formulas ?? []).flatMap((formula) => formula.names);
+  for (const name of [...names, ...(read.reading?.symbols ?? [])]) {
+    const definer = definers.get(name);
+    if (definer !== undefined) uses.add(definer);
   }
   return { ...read, uses: [...uses], structure: structureOf(read, definers) };
 }

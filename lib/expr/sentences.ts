@@ -133,6 +133,21 @@ const sentences: Record<string, Sentence> = {
   "no-root": (_, t) =>
     `The expression does not change its sign between the limits (it is ${short(t.text("lower"))} at the lower and ${short(t.text("upper"))} at the upper, in SI). Widen the range.`,
 
+  "not-a-given": (_, t) =>
+    `“${t.text("symbol")}” is not a given of this calculation. Only a given can be varied or solved for.`,
+  "not-a-relation": (_, t) =>
+    `“${t.text("symbol")}” is not a relation of this calculation that has a value.`,
+  "does-not-depend": (_, t) =>
+    `“${t.text("target")}” does not depend on “${t.text("symbol")}”, so it cannot be solved for it.`,
+  "decides-dimension": (_, t) =>
+    `“${t.text("symbol")}” stands in an exponent that decides a dimension; it cannot be varied.`,
+  "range-order": () => "A range runs from one value to another, different one.",
+  "range-log": () => "A range in equal ratios needs both ends positive. Choose linear spacing.",
+  "sweep-points": (_, t) =>
+    `This sweep has ${t.text("found")} values; at most 10⁶ are computed. Take fewer points, or show fewer relations.`,
+  "no-solution": (_, t) =>
+    `“${t.text("target")}” does not reach ${t.text("equals")} in this range: it runs from ${short(t.text("lower"))} to ${short(t.text("upper"))} ${t.text("unit")}.`,
+
   "uncertainty-negative": () => "An uncertainty is a standard deviation and cannot be negative.",
   "factor-below-one": () => "“Within a factor f” needs f of at least 1.",
   "interval-order": () =>

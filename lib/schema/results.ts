@@ -104,6 +104,34 @@ export const checkResultSchema = z.object({
   ...notices,
 });
 
+/** One relation over the points of a sweep; null where it has no value. */
+export const seriesSchema = z.object({
+  symbol: z.string(),
+  unit: z.string(),
+  values: z.array(z.number().nullable()),
+});
+
+export const sweepResultSchema = z.object({
+  kind: z.literal("sweep"),
+  status: z.literal("ok"),
+  over: z.string(),
+  unit: z.string(),
+  spacing: z.enum(["log", "linear"]),
+  points: z.array(z.number()),
+  series: z.array(seriesSchema),
+  ...notices,
+});
+
+export const solveResultSchema = z.object({
+  kind: z.literal("solve"),
+  status: z.literal("ok"),
+  /** The given that was solved for, and every value of it found, in `unit`. */
+  symbol: z.string(),
+  unit: z.string(),
+  solutions: z.array(z.number()),
+  ...notices,
+});
+
 export const cellResultSchema = z.union([
   failed,
   textResultSchema,
@@ -111,6 +139,8 @@ export const cellResultSchema = z.union([
   functionResultSchema,
   relationResultSchema,
   checkResultSchema,
+  sweepResultSchema,
+  solveResultSchema,
 ]);
 
 export const resultsSchema = z.object({
@@ -129,5 +159,7 @@ export type GivenResult = z.infer<typeof givenResultSchema>;
 export type RelationResult = z.infer<typeof relationResultSchema>;
 export type FunctionResult = z.infer<typeof functionResultSchema>;
 export type CheckResult = z.infer<typeof checkResultSchema>;
+export type SweepResult = z.infer<typeof sweepResultSchema>;
+export type SolveResult = z.infer<typeof solveResultSchema>;
 export type CellResult = z.infer<typeof cellResultSchema>;
 export type Results = z.infer<typeof resultsSchema>;

@@ -17,6 +17,8 @@ export interface Declaration {
 /** A cell as read under the roles of all names: the formulas it rests on. */
 export interface Reading {
   readonly formulas: readonly Formula[];
+  /** Symbols it rests on without a formula: those a sweep shows, or a solve looks at. */
+  readonly symbols?: readonly string[];
 }
 
 /** What evaluation of one cell may use. */
@@ -27,6 +29,8 @@ export interface EvaluationContext {
   readonly runtime: Runtime;
   /** The value of an input in SI. */
   value(key: InputKey): number;
+  /** The formula of the relation that defines a symbol; undefined for a given. */
+  formulaOf(symbol: string): Formula | undefined;
 }
 
 /** What one cell comes to. */
