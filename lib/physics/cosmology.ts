@@ -1,7 +1,8 @@
 /**
  * Distances and times of a flat universe of matter and a cosmological constant, without radiation:
- * H₀ = 70 km s⁻¹ Mpc⁻¹, Ω_m = 0.3. Formulas as in Hogg 1999 (astro-ph/9905116), from memory, checked
- * against a general-purpose library. All results in SI; NaN for z ≤ −1.
+ * H₀ = 70 km s⁻¹ Mpc⁻¹, Ω_m = 0.3. Hogg 1999, astro-ph/9905116: eq. 14 for E(z), 15 for the
+ * comoving distance, 30 for the look-back time (numbers as others cite them, the paper not seen);
+ * checked against a general-purpose library. All results in SI; NaN for z ≤ −1.
  */
 export const defaultCosmology = { hubbleKmSMpc: 70, omegaMatter: 0.3 } as const;
 

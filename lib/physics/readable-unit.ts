@@ -3,71 +3,68 @@ import { baseUnits, customaryUnit } from "./dimension-names";
 import { parseUnit } from "./parse-unit";
 import type { EmConvention, UnitSystem } from "./unit-system";
 
+/** A unit, and the least number of it at which it is taken; 1 where nothing is said. */
+type Rung = string | readonly [unit: string, least: number];
+
 /**
- * Ladders of units that the field reads a quantity in; the largest one that leaves the number at 1 or
- * more is taken, from the value in SI.
+ * Ladders of units that the field reads a quantity in, upwards: the last one is taken whose least
+ * number is reached, or the first. Solar masses begin early, since a ten-thousandth of one is still
+ * an ejecta mass; a flux density far beyond a megajansky is one at the source.
  */
-const ladders: readonly (readonly string[])[] = [
-  ["fm", "pm", "nm", "µm", "cm", "km", "Rsun", "au", "pc", "kpc", "Mpc", "Gpc"],
+const ladders: readonly (readonly Rung[])[] = [
+  ["fm", "pm", "nm", "µm", "mm", "cm", "km", "Rsun", "au", "pc", "kpc", "Mpc", "Gpc"],
   ["ns", "µs", "ms", "s", "day", "yr", "Myr", "Gyr"],
-  ["Hz", "kHz", "MHz", "GHz", "THz"],
-  ["g", "Msun"],
+  ["s^-1", "Hz", "kHz", "MHz", "GHz", "THz"],
+  ["g", ["Msun", 1e-4]],
+  ["g/s", ["Msun/yr", 1e-14]],
   ["µK", "mK", "K"],
   ["cm/s", "km/s"],
-  ["mas", "arcsec"],
   ["µeV", "meV", "eV", "keV", "MeV", "GeV", "erg"],
   ["µgauss", "mgauss", "gauss"],
-  ["µJy", "mJy", "Jy"],
+  ["µJy", "mJy", "Jy", ["erg/s/cm^2/Hz", 1e-17]],
 ];
 
-/** Mass rates are read in solar masses a year wherever they are not tiny. */
-const preferred: readonly (readonly [unit: string, least: number])[] = [["Msun/yr", 1e-14]];
+interface Step {
+  readonly unit: string;
+  readonly dimension: Dimension;
+  /** In SI. */
+  readonly from: number;
+}
 
-const factors = new Map<string, Map<Dimension, readonly (readonly [string, number])[]>>();
+function toStep(rung: Rung, system: UnitSystem): Step {
+  const [unit, least] = typeof rung === "string" ? [rung, 1] : rung;
+  const parsed = parseUnit(unit, system);
+  if (!parsed.ok) throw new Error(`a ladder has ${unit}, which is no unit`);
+  // A value that is one of a unit to within rounding has reached it.
+  return { unit, dimension: parsed.dimension, from: least * parsed.factor * (1 - 1e-12) };
+}
 
-function laddersFor(em: EmConvention) {
-  const known = factors.get(em);
-  if (known) return known;
+function readLadders(em: EmConvention): Map<Dimension, readonly Step[]> {
   const system: UnitSystem = { edition: "codata-2018", em };
-  const table = new Map<Dimension, readonly (readonly [string, number])[]>();
+  const table = new Map<Dimension, readonly Step[]>();
   for (const ladder of ladders) {
-    const steps = ladder.flatMap((unit) => {
-      const parsed = parseUnit(unit, system);
-      return parsed.ok ? [{ unit, factor: parsed.factor, dimension: parsed.dimension }] : [];
-    });
-    const of = steps[0]?.dimension;
-    if (of && of.key !== "0,0,0,0,0,0,0" && !table.has(of)) {
-      table.set(
-        of,
-        steps.map(({ unit, factor }) => [unit, factor] as const),
-      );
-    }
+    const steps = ladder.map((rung) => toStep(rung, system));
+    if (steps[0]) table.set(steps[0].dimension, steps);
   }
-  factors.set(em, table);
   return table;
 }
 
-function preferredUnit(of: Dimension, size: number, em: EmConvention): string | undefined {
-  const system: UnitSystem = { edition: "codata-2018", em };
-  for (const [unit, least] of preferred) {
-    const parsed = parseUnit(unit, system);
-    if (parsed.ok && parsed.dimension === of && size / parsed.factor >= least) return unit;
-  }
-  return undefined;
+const tables = new Map<EmConvention, ReturnType<typeof readLadders>>();
+
+function ladderOf(of: Dimension, em: EmConvention): readonly Step[] | undefined {
+  const table = tables.get(em) ?? readLadders(em);
+  tables.set(em, table);
+  return table.get(of);
 }
 
 /**
  * A readable unit for a value of this dimension, as the field would choose it: by its size where there
- * is a ladder, else the customary unit, else base units in CGS. Always a valid unit of the dimension.
+ * is a ladder, else (and for zero and what is not finite) the customary unit, else base units in CGS.
+ * Always a valid unit of the dimension.
  */
 export function readableUnit(of: Dimension, siValue: number, em: EmConvention): string {
   const size = Math.abs(siValue);
-  const chosen = preferredUnit(of, size, em);
-  if (chosen !== undefined) return chosen;
-  const ladder = laddersFor(em).get(of);
-  if (ladder) {
-    const fitting = ladder.filter(([, factor]) => size >= factor * 0.999_999);
-    return (fitting[fitting.length - 1] ?? ladder[0] ?? ["", 1])[0];
-  }
-  return customaryUnit(of, em) ?? baseUnits(of);
+  const ladder = size > 0 && Number.isFinite(size) ? ladderOf(of, em) : undefined;
+  const step = ladder?.findLast(({ from }) => size >= from) ?? ladder?.[0];
+  return step?.unit ?? customaryUnit(of, em) ?? baseUnits(of);
 }

@@ -172,7 +172,7 @@ export const unitRows: readonly UnitRow[] = [
     dimension({ length: -2, time: -1 }),
     1e10 / (4 * Math.PI),
     ["k"],
-    "Baker & Romick 1976, Applied Optics 15, 1966",
+    "Baker & Romick 1976, Applied Optics 15, 1966 (as cited by others)",
   ),
   row("atm", "standard atmosphere", pressure, 101325, none, sp811),
   row("bar", "bar", pressure, 1e5, ["m", "u", "k", "M", "G"], sp811),

@@ -4,6 +4,8 @@ import type { ConstantRow } from "./constant";
 
 const listing = "CODATA 2022, complete listing (NIST)";
 const derived = (formula: string) => `${listing}; exact, computed as ${formula}`;
+const read = "read from the listing";
+const computed = "computed from the exact constants to twenty digits";
 
 export const codata2022: readonly ConstantRow[] = [
   {
@@ -13,6 +15,7 @@ export const codata2022: readonly ConstantRow[] = [
     uncertainty: null,
     unit: "m s^-1",
     source: listing,
+    sourceStatus: read,
   },
   {
     symbol: "h",
@@ -21,6 +24,7 @@ export const codata2022: readonly ConstantRow[] = [
     uncertainty: null,
     unit: "J s",
     source: listing,
+    sourceStatus: read,
   },
   {
     symbol: "hbar",
@@ -29,6 +33,7 @@ export const codata2022: readonly ConstantRow[] = [
     uncertainty: null,
     unit: "J s",
     source: derived("h / (2 pi)"),
+    sourceStatus: computed,
   },
   {
     symbol: "q_e",
@@ -37,6 +42,7 @@ export const codata2022: readonly ConstantRow[] = [
     uncertainty: null,
     unit: "C",
     source: listing,
+    sourceStatus: read,
   },
   {
     symbol: "k_B",
@@ -45,6 +51,7 @@ export const codata2022: readonly ConstantRow[] = [
     uncertainty: null,
     unit: "J K^-1",
     source: listing,
+    sourceStatus: read,
   },
   {
     symbol: "N_A",
@@ -53,6 +60,7 @@ export const codata2022: readonly ConstantRow[] = [
     uncertainty: null,
     unit: "mol^-1",
     source: listing,
+    sourceStatus: read,
   },
   {
     symbol: "R_gas",
@@ -61,6 +69,7 @@ export const codata2022: readonly ConstantRow[] = [
     uncertainty: null,
     unit: "J mol^-1 K^-1",
     source: derived("N_A k_B"),
+    sourceStatus: computed,
   },
   {
     symbol: "F_faraday",
@@ -69,6 +78,7 @@ export const codata2022: readonly ConstantRow[] = [
     uncertainty: null,
     unit: "C mol^-1",
     source: derived("N_A q_e"),
+    sourceStatus: computed,
   },
   {
     symbol: "sigma_SB",
@@ -77,6 +87,7 @@ export const codata2022: readonly ConstantRow[] = [
     uncertainty: null,
     unit: "W m^-2 K^-4",
     source: derived("2 pi^5 k_B^4 / (15 h^3 c^2)"),
+    sourceStatus: computed,
   },
   {
     symbol: "a_rad",
@@ -85,6 +96,7 @@ export const codata2022: readonly ConstantRow[] = [
     uncertainty: null,
     unit: "J m^-3 K^-4",
     source: derived("4 sigma_SB / c"),
+    sourceStatus: computed,
   },
   {
     symbol: "b_wien",
@@ -93,6 +105,7 @@ export const codata2022: readonly ConstantRow[] = [
     uncertainty: null,
     unit: "m K",
     source: derived("h c / (4.96511… k_B)"),
+    sourceStatus: computed,
   },
   {
     symbol: "G",
@@ -101,6 +114,7 @@ export const codata2022: readonly ConstantRow[] = [
     uncertainty: "0.00015e-11",
     unit: "m^3 kg^-1 s^-2",
     source: listing,
+    sourceStatus: read,
   },
   {
     symbol: "m_e",
@@ -109,6 +123,7 @@ export const codata2022: readonly ConstantRow[] = [
     uncertainty: "0.0000000028e-31",
     unit: "kg",
     source: listing,
+    sourceStatus: read,
   },
   {
     symbol: "m_p",
@@ -117,6 +132,7 @@ export const codata2022: readonly ConstantRow[] = [
     uncertainty: "0.00000000052e-27",
     unit: "kg",
     source: listing,
+    sourceStatus: read,
   },
   {
     symbol: "m_n",
@@ -125,6 +141,7 @@ export const codata2022: readonly ConstantRow[] = [
     uncertainty: "0.00000000085e-27",
     unit: "kg",
     source: listing,
+    sourceStatus: read,
   },
   {
     symbol: "m_alpha",
@@ -133,6 +150,7 @@ export const codata2022: readonly ConstantRow[] = [
     uncertainty: "0.0000000021e-27",
     unit: "kg",
     source: listing,
+    sourceStatus: read,
   },
   {
     symbol: "u_amu",
@@ -141,6 +159,7 @@ export const codata2022: readonly ConstantRow[] = [
     uncertainty: "0.00000000052e-27",
     unit: "kg",
     source: listing,
+    sourceStatus: read,
   },
   {
     symbol: "alpha_fs",
@@ -149,6 +168,7 @@ export const codata2022: readonly ConstantRow[] = [
     uncertainty: "0.0000000011e-3",
     unit: "",
     source: listing,
+    sourceStatus: read,
   },
   {
     symbol: "eps_0",
@@ -157,6 +177,7 @@ export const codata2022: readonly ConstantRow[] = [
     uncertainty: "0.0000000014e-12",
     unit: "F m^-1",
     source: listing,
+    sourceStatus: read,
   },
   {
     symbol: "mu_0",
@@ -165,6 +186,7 @@ export const codata2022: readonly ConstantRow[] = [
     uncertainty: "0.00000000020e-6",
     unit: "N A^-2",
     source: listing,
+    sourceStatus: read,
   },
   {
     symbol: "R_inf",
@@ -173,6 +195,7 @@ export const codata2022: readonly ConstantRow[] = [
     uncertainty: "0.000012",
     unit: "m^-1",
     source: listing,
+    sourceStatus: read,
   },
   {
     symbol: "a_0",
@@ -181,6 +204,7 @@ export const codata2022: readonly ConstantRow[] = [
     uncertainty: "0.00000000082e-11",
     unit: "m",
     source: listing,
+    sourceStatus: read,
   },
   {
     symbol: "r_e",
@@ -189,6 +213,7 @@ export const codata2022: readonly ConstantRow[] = [
     uncertainty: "0.0000000013e-15",
     unit: "m",
     source: listing,
+    sourceStatus: read,
   },
   {
     symbol: "lambda_C",
@@ -197,6 +222,7 @@ export const codata2022: readonly ConstantRow[] = [
     uncertainty: "0.00000000076e-12",
     unit: "m",
     source: listing,
+    sourceStatus: read,
   },
   {
     symbol: "sigma_T",
@@ -205,6 +231,7 @@ export const codata2022: readonly ConstantRow[] = [
     uncertainty: "0.0000000062e-29",
     unit: "m^2",
     source: listing,
+    sourceStatus: read,
   },
   {
     symbol: "mu_B",
@@ -213,6 +240,7 @@ export const codata2022: readonly ConstantRow[] = [
     uncertainty: "0.0000000029e-24",
     unit: "J T^-1",
     source: listing,
+    sourceStatus: read,
   },
   {
     symbol: "mu_N",
@@ -221,6 +249,7 @@ export const codata2022: readonly ConstantRow[] = [
     uncertainty: "0.0000000016e-27",
     unit: "J T^-1",
     source: listing,
+    sourceStatus: read,
   },
   {
     symbol: "G_F",
@@ -229,6 +258,7 @@ export const codata2022: readonly ConstantRow[] = [
     uncertainty: "0.0000006e-5",
     unit: "GeV^-2",
     source: listing,
+    sourceStatus: read,
   },
   {
     symbol: "Ry",
@@ -237,5 +267,6 @@ export const codata2022: readonly ConstantRow[] = [
     uncertainty: "0.000000000015",
     unit: "eV",
     source: listing,
+    sourceStatus: read,
   },
 ];

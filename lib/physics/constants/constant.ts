@@ -10,6 +10,8 @@ export interface ConstantRow {
   /** In the unit language; empty for a pure number. */
   readonly unit: string;
   readonly source: string;
+  /** How the figures came here: read, computed, or known and checked. */
+  readonly sourceStatus: string;
   /** The nominal GM in m³ s⁻², for a mass that is GM over the edition's G. */
   readonly massParameter?: string;
 }
@@ -30,5 +32,6 @@ export interface Constant {
   readonly dimension: Dimension;
   readonly exact: boolean;
   readonly source: string;
+  readonly sourceStatus: string;
   readonly nominalGM?: number;
 }

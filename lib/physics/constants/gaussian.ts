@@ -11,6 +11,7 @@ export const gaussianOnly: ConstantRow = {
   uncertainty: null,
   unit: "esu",
   source: "exact: q_e in coulomb times 2997924580",
+  sourceStatus: "computed from the exact constants",
 };
 
 /** Rows whose figures are those of the SI edition times a power of ten, in a Gaussian unit. */

@@ -1,9 +1,8 @@
 import type { ConstantRow } from "./constant";
 
-/**
- * Nominal and defined values of the IAU: conversion constants, exact by resolution. Values from
- * memory, checked against the general-purpose library that the reference tests run.
- */
+/** Nominal and defined values of the IAU: conversion constants, exact by resolution. */
+const checked = "from memory, checked against a general-purpose library";
+const divided = "computed";
 const b3 = "IAU 2015 Resolution B3 (nominal conversion constant)";
 const overG = "IAU 2015 Resolution B3, nominal GM over the edition’s G";
 
@@ -14,6 +13,7 @@ const nominal = (symbol: string, name: string, value: string, unit: string): Con
   uncertainty: null,
   unit,
   source: b3,
+  sourceStatus: checked,
 });
 
 const mass = (symbol: string, name: string, massParameter: string): ConstantRow => ({
@@ -23,6 +23,7 @@ const mass = (symbol: string, name: string, massParameter: string): ConstantRow 
   uncertainty: null,
   unit: "kg",
   source: overG,
+  sourceStatus: divided,
   massParameter,
 });
 
@@ -45,6 +46,7 @@ export const iauConstants: readonly ConstantRow[] = [
     uncertainty: null,
     unit: "m",
     source: "IAU 2012 Resolution B2",
+    sourceStatus: checked,
   },
   {
     symbol: "pc",
@@ -53,6 +55,7 @@ export const iauConstants: readonly ConstantRow[] = [
     uncertainty: null,
     unit: "m",
     source: "IAU 2015 Resolution B2",
+    sourceStatus: checked,
   },
   {
     symbol: "ly",
@@ -61,5 +64,6 @@ export const iauConstants: readonly ConstantRow[] = [
     uncertainty: null,
     unit: "m",
     source: "IAU Style Manual (Wilkins 1989)",
+    sourceStatus: checked,
   },
 ];

@@ -19,7 +19,10 @@ export function editionTitle(name: EditionName): string {
   return editions[name].title;
 }
 
-/** Every row of an edition as canonical text; its SHA-256 is the edition's hash. */
+/**
+ * Every row of an edition as canonical text; its SHA-256 is the edition's hash. Only what decides a
+ * result is in it: a better wording of a name or a source leaves the hash as it is.
+ */
 export function editionText(name: EditionName): string {
   return JSON.stringify(
     editions[name].rows.map((row) => [
@@ -50,6 +53,11 @@ function shifted(text: string, by: number): string {
   return `${digits}e${Number(power) + by}`;
 }
 
+/** A number as a decimal string of so many digits, in the spelling of the tables. */
+function decimal(value: number, digits: number): string {
+  return value.toExponential(digits - 1).replace("e+", "e");
+}
+
 /** A mass parameter over G, with G's relative uncertainty. */
 function massOverG(row: ConstantRow, system: UnitSystem): Constant {
   const g = findConstant("G", system) as Constant;
@@ -57,7 +65,7 @@ function massOverG(row: ConstantRow, system: UnitSystem): Constant {
   const value = nominalGM / g.siValue;
   const uncertainty = (value * g.siUncertainty) / g.siValue;
   return finish(
-    { ...row, value: value.toPrecision(12), uncertainty: uncertainty.toPrecision(2) },
+    { ...row, value: decimal(value, 12), uncertainty: decimal(uncertainty, 2) },
     value,
     uncertainty,
     system,
@@ -87,6 +95,7 @@ function finish(
     dimension: unit.dimension,
     exact: row.uncertainty === null,
     source: row.source,
+    sourceStatus: row.sourceStatus,
     ...(nominalGM === undefined ? {} : { nominalGM }),
   };
 }
