@@ -28,6 +28,26 @@ function field(result: CellResult, name: string): Scalar | undefined {
     : undefined;
 }
 
+/** Every number of a result that has many: the points and series of a sweep, the roots of a solve. */
+function listOf(result: CellResult): Scalar[] {
+  if ("series" in result) {
+    const series = result.series.flatMap(({ symbol, unit, values }) => [symbol, unit, ...values]);
+    return [...result.points, ...series];
+  }
+  return "solutions" in result ? result.solutions : [];
+}
+
+/** The first place where two lists differ; a list that is shorter differs where it ends. */
+function listDifference(cell: string, was: Scalar[], is: Scalar[], symbol: { symbol?: string }) {
+  const length = Math.max(was.length, is.length);
+  const at = Array.from({ length }, (_, i) => i).find(
+    (i) => i >= was.length || i >= is.length || !equalWithin(valueTolerance, was[i], is[i]),
+  );
+  return at === undefined
+    ? []
+    : [difference(cell, "value", was[at] ?? null, is[at] ?? null, symbol)];
+}
+
 /** What is compared of two results that both went well, each with its tolerance. */
 const compared = [
   { what: "unit", tolerance: 0 },
@@ -62,12 +82,13 @@ function cellDifferences(cell: string, recorded: CellResult, recomputed: CellRes
   const before = statusOf(recorded);
   const after = statusOf(recomputed);
   if (before !== after) return [difference(cell, "status", before, after, symbol)];
-  return compared.flatMap(({ what, tolerance }) => {
+  const scalars = compared.flatMap(({ what, tolerance }) => {
     const was = field(recorded, what);
     const is = field(recomputed, what);
     if (equalWithin(tolerance, was, is)) return [];
     return [difference(cell, what, was ?? null, is ?? null, symbol)];
   });
+  return [...scalars, ...listDifference(cell, listOf(recorded), listOf(recomputed), symbol)];
 }
 
 /** A cell's result, never something that every object inherits. */

@@ -80,6 +80,37 @@ describe("compareResults", () => {
   });
 });
 
+describe("results with many numbers", () => {
+  const sweep = (values: (number | null)[]) => ({
+    kind: "sweep",
+    status: "ok",
+    over: "M",
+    unit: "Msun",
+    spacing: "log",
+    points: [1, 10],
+    series: [{ symbol: "L", unit: "erg/s", values }],
+  });
+  const solve = (solutions: number[]) => ({
+    kind: "solve",
+    status: "ok",
+    symbol: "M",
+    unit: "",
+    solutions,
+  });
+
+  it("compares every point of a sweep, gaps included", () => {
+    expect(differs(sweep([1, 2]), sweep([1, 2 * (1 + 1e-13)]))).toEqual([]);
+    expect(differs(sweep([1, 2]), sweep([1, 2.5]))).toEqual(["value: 2 → 2.5"]);
+    expect(differs(sweep([1, null]), sweep([1, 2]))).toEqual(["value: null → 2"]);
+  });
+
+  it("compares every solution, and how many there are", () => {
+    expect(differs(solve([1, 2]), solve([1, 2]))).toEqual([]);
+    expect(differs(solve([1, 2]), solve([1, 3]))).toEqual(["value: 2 → 3"]);
+    expect(differs(solve([1, 2]), solve([1]))).toEqual(["value: 2 → null"]);
+  });
+});
+
 describe("verdictOn", () => {
   it("reproduces when nothing differs, and carries today's results", () => {
     const today = results({ c: given() });
