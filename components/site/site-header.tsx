@@ -8,7 +8,7 @@ export function SiteHeader({ person }: { person: { name: string } | null }) {
     <header className="no-print">
       <div className="spectrum" aria-hidden="true" />
       <div className="mx-auto flex w-full max-w-page flex-wrap items-baseline gap-x-8 gap-y-1 px-4 py-3 sm:px-8">
-        <Link href="/" className="text-xl font-semibold tracking-tight">
+        <Link href="/" className="w-full text-xl font-semibold tracking-tight sm:w-auto">
           Leading <i className="font-normal">Order</i>
         </Link>
         <nav

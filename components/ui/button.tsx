@@ -4,14 +4,14 @@ import type { ComponentProps } from "react";
 type Look = "primary" | "plain" | "danger" | "quiet";
 
 const looks: Record<Look, string> = {
-  primary: "border-ink bg-ink text-ground hover:bg-calcium hover:border-calcium",
-  plain: "border-ink text-ink hover:border-calcium hover:text-calcium",
-  danger: "border-halpha text-halpha hover:bg-halpha hover:text-ground",
+  primary: "px-3 border-ink bg-ink text-ground hover:bg-calcium hover:border-calcium",
+  plain: "px-3 border-ink text-ink hover:border-calcium hover:text-calcium",
+  danger: "px-3 border-halpha text-halpha hover:bg-halpha hover:text-ground",
   quiet: "border-transparent text-calcium underline underline-offset-4 decoration-1 px-0.5",
 };
 
 const shape =
-  "inline-flex items-center justify-center min-h-9 border px-3 py-1.5 font-sans text-sm leading-tight cursor-pointer disabled:cursor-default disabled:opacity-60 transition-colors motion-reduce:transition-none";
+  "inline-flex items-center justify-center min-h-9 border py-1.5 font-sans text-sm leading-tight cursor-pointer disabled:cursor-default disabled:opacity-60 transition-colors motion-reduce:transition-none";
 
 /** A button; `look` says how much it matters. */
 export function Button({

@@ -1,13 +1,26 @@
 const superscripts = "⁰¹²³⁴⁵⁶⁷⁸⁹⁻⁺";
 const plain = "0123456789−+";
+const raisedOrLowered = /([⁰¹²³⁴⁵⁶⁷⁸⁹⁻⁺]+|[⊙⊕])/u;
 
-/** Text with its raised characters (cm⁻², 10³⁹) set as raised figures of the typeface in force. */
+function onTheLine(raised: string): string {
+  return [...raised].map((ch) => plain[superscripts.indexOf(ch)] ?? ch).join("");
+}
+
+/**
+ * Text such as “10³⁹ M⊙ s⁻¹” with raised and lowered figures of the typeface in force. Copied, or
+ * read aloud, an exponent keeps its `^`.
+ */
 export function Superscripts({ text }: { text: string }) {
-  const parts = text.split(/([⁰¹²³⁴⁵⁶⁷⁸⁹⁻⁺]+)/u);
+  const parts = text.split(raisedOrLowered);
   return parts.map((part, index) => {
-    const lowered = [...part].map((ch) => plain[superscripts.indexOf(ch)] ?? ch).join("");
-    // Parts are found by their place: the text is set afresh as a whole.
-    // biome-ignore lint/suspicious/noArrayIndexKey: see above.
-    return index % 2 === 1 ? <sup key={index}>{lowered}</sup> : part;
+    const key = `${index}${part}`;
+    if (index % 2 === 0) return part;
+    if (part === "⊙" || part === "⊕") return <sub key={key}>{part}</sub>;
+    return (
+      <sup key={key}>
+        <span className="sr-only">^</span>
+        {onTheLine(part)}
+      </sup>
+    );
   });
 }
