@@ -27,7 +27,7 @@ function isTextField(target: EventTarget): boolean {
 }
 
 /** The calculation as its author works on it: cells, thread and margin. */
-export function Folio({ draft, first }: { draft: Draft; first: EvaluateAnswer }) {
+export function Folio({ draft, first }: { draft: Draft; first: EvaluateAnswer | undefined }) {
   const [state, dispatch] = useReducer(folioReducer, draft, startFolio);
   const [versions, setVersions] = useState(draft.versions);
   const [visibility, setVisibility] = useState(draft.visibility);

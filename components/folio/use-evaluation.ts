@@ -1,7 +1,7 @@
 "use client";
 
 import { useEffect, useRef, useState } from "react";
-import type { CalculationFile, EvaluateAnswer } from "@/lib/schema";
+import { type CalculationFile, type EvaluateAnswer, resultsFormat } from "@/lib/schema";
 import { evaluateFile, tellProblem } from "./folio-api";
 
 /** Keystrokes closer together than this are evaluated once. */
@@ -27,11 +27,22 @@ function afterPaint(work: () => void): void {
   requestAnimationFrame(() => setTimeout(work, 0));
 }
 
+/** What is shown before there is any answer: nothing. */
+function noAnswer(file: CalculationFile): EvaluateAnswer {
+  return { format: resultsFormat, engine: "", edition: file.edition, contentHash: "", cells: {} };
+}
+
 /** The results of the file, asked of the server as it changes; old ones stay until new ones come. */
-export function useEvaluation(file: CalculationFile, first: EvaluateAnswer): Evaluation {
-  const [current, setCurrent] = useState({ answer: first, evaluated: file });
+export function useEvaluation(
+  file: CalculationFile,
+  first: EvaluateAnswer | undefined,
+): Evaluation {
+  const [current, setCurrent] = useState(() => ({
+    answer: first ?? noAnswer(file),
+    evaluated: file,
+  }));
   const [trouble, setTrouble] = useState<string>();
-  const [tries, setTries] = useState(0);
+  const [tries, setTries] = useState(first ? 0 : 1);
   const latest = useRef(file);
 
   useEffect(() => {

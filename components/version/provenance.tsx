@@ -34,13 +34,13 @@ export function Provenance({ file, url }: { file: VersionFile; url: string }) {
       </Row>
       {forkedFrom && (
         <Row term="forked from">
-          <a href={`/c/${forkedFrom.calculation}/v/${forkedFrom.number}`}>
+          <a className="link" href={`/c/${forkedFrom.calculation}/v/${forkedFrom.number}`}>
             {forkedFrom.calculation} v{forkedFrom.number}
           </a>
         </Row>
       )}
       <Row term="link">
-        <a href={url} className="break-all">
+        <a href={url} className="link break-all">
           {url}
         </a>
       </Row>

@@ -7,7 +7,9 @@ function Row({ difference }: { difference: Difference }) {
   return (
     <tr className="border-t border-rule align-baseline">
       <th scope="row" className="py-1 pr-4 text-left font-normal">
-        <a href={`#cell-${difference.cell}`}>{difference.symbol ?? difference.cell}</a>
+        <a className="link" href={`#cell-${difference.cell}`}>
+          {difference.symbol ?? difference.cell}
+        </a>
       </th>
       <td className="py-1 pr-4">{difference.what}</td>
       <td className="py-1 pr-4 font-mono">{tellValue(difference.recorded)}</td>

@@ -30,9 +30,15 @@ export function VersionActions({
         </p>
       </noscript>
       <p className="mt-4 flex flex-wrap items-baseline gap-x-5 gap-y-2 font-sans text-sm">
-        <a href={`/api/calculations/${id}/versions/${number}?download=1`}>download version file</a>
+        <a className="link" href={`/api/calculations/${id}/versions/${number}?download=1`}>
+          download version file
+        </a>
         <CopyLink url={url} number={number} />
-        {mayEdit && <a href={`/c/${id}`}>open the draft</a>}
+        {mayEdit && (
+          <a className="link" href={`/c/${id}`}>
+            open the draft
+          </a>
+        )}
         {mayWithdraw && <WithdrawButton id={id} number={number} />}
       </p>
     </section>

@@ -7,7 +7,7 @@ import type { VersionCell as Shown } from "./read-version";
 export function VersionCell({ cell, result, shown }: Shown) {
   const isKept = cell.kind === "sweep" || cell.kind === "solve";
   return (
-    <li id={`cell-${cell.id}`} className="version-cell">
+    <li id={`cell-${cell.id}`} className="break-inside-avoid py-2">
       {isKept ? (
         <>
           <code className="font-mono text-sm">{keptLine(cell)}</code>

@@ -23,7 +23,7 @@ export function VersionPage(props: VersionPageProps) {
   const { file, withdrawn, role, latest, url, presentation } = props;
   const { calculation: id, number } = file.version;
   return (
-    <div className="version-page mx-auto w-full max-w-[44rem] px-4 py-8">
+    <main id="main" className="mx-auto w-full max-w-folio px-4 py-8">
       {withdrawn && <WithdrawnNotice number={number} {...withdrawn} />}
       <header className="mb-8">
         <h1 className="break-words font-serif text-3xl font-semibold">
@@ -34,7 +34,9 @@ export function VersionPage(props: VersionPageProps) {
           {latest > number && (
             <>
               {" · "}
-              <a href={`/c/${id}/v/${latest}`}>v{latest} is the latest</a>
+              <a className="link" href={`/c/${id}/v/${latest}`}>
+                v{latest} is the latest
+              </a>
             </>
           )}
         </p>
@@ -64,6 +66,6 @@ export function VersionPage(props: VersionPageProps) {
         mayEdit={role === "author"}
         mayWithdraw={role === "author" && withdrawn === null}
       />
-    </div>
+    </main>
   );
 }

@@ -1,43 +1,53 @@
 import type { Metadata } from "next";
-import { notFound, redirect } from "next/navigation";
+import { notFound } from "next/navigation";
+import { cache } from "react";
 import { Folio } from "@/components/folio/folio";
+import { VersionList } from "@/components/version/version-list";
 import { currentPerson } from "@/lib/auth/current-person";
-import {
-  isRefused,
-  maybeCalculationId,
-  readDraft,
-  readOverview,
-  versionPath,
-} from "@/lib/calculations";
-import { evaluate } from "@/lib/evaluator";
+import { isRefused, maybeCalculationId, readDraft, readOverview } from "@/lib/calculations";
+import { EvaluatorBusyError, evaluate } from "@/lib/evaluator";
+import type { CalculationFile, Draft, EvaluateAnswer } from "@/lib/schema";
 import "@/components/folio/folio.css";
 
 type Address = { params: Promise<{ id: string }> };
 
-/** The draft for its author; everybody else is taken to the latest version they may read. */
-async function requireDraft({ params }: Address) {
-  const id = maybeCalculationId((await params).id);
+/** The draft for its author; for everybody else the versions they may read, if there are any. */
+const requireCalculation = cache(async (typed: string) => {
+  const id = maybeCalculationId(typed);
   if (id === undefined) notFound();
   const person = await currentPerson();
   const draft = await readDraft(person, id);
-  if (!isRefused(draft)) return draft;
+  if (!isRefused(draft)) return { draft };
   const overview = await readOverview(person, id);
-  const latest = isRefused(overview) ? undefined : overview.versions.at(-1);
-  if (latest) redirect(versionPath(id, latest.number));
-  return notFound();
+  if (isRefused(overview) || overview.versions.length === 0) notFound();
+  return { overview };
+});
+
+/** The first results; without them the folio opens all the same and asks again by itself. */
+async function firstAnswer(file: CalculationFile): Promise<EvaluateAnswer | undefined> {
+  try {
+    return await evaluate(file, { present: true });
+  } catch (error) {
+    if (error instanceof EvaluatorBusyError) return undefined;
+    throw error;
+  }
 }
 
-export async function generateMetadata(address: Address): Promise<Metadata> {
-  const { file } = await requireDraft(address);
-  return { title: file.title || "Untitled calculation", robots: { index: false } };
-}
-
-export default async function Page(address: Address) {
-  const draft = await requireDraft(address);
-  const first = await evaluate(draft.file, { present: true });
+async function FolioPage({ draft }: { draft: Draft }) {
   return (
     <main id="main">
-      <Folio draft={draft} first={first} />
+      <Folio draft={draft} first={await firstAnswer(draft.file)} />
     </main>
   );
+}
+
+export async function generateMetadata({ params }: Address): Promise<Metadata> {
+  const { draft, overview } = await requireCalculation((await params).id);
+  const title = draft?.file.title || overview?.title || "Untitled calculation";
+  return overview?.visibility === "public" ? { title } : { title, robots: { index: false } };
+}
+
+export default async function Page({ params }: Address) {
+  const { draft, overview } = await requireCalculation((await params).id);
+  return draft ? <FolioPage draft={draft} /> : <VersionList {...overview} />;
 }

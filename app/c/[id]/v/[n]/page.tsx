@@ -1,5 +1,6 @@
 import type { Metadata } from "next";
 import { notFound } from "next/navigation";
+import { cache } from "react";
 import { versionMetadata } from "@/components/version/version-metadata";
 import { VersionPage } from "@/components/version/version-page";
 import { currentPerson } from "@/lib/auth/current-person";
@@ -7,19 +8,18 @@ import { isRefused, maybeCalculationId, readVersion, versionPath } from "@/lib/c
 import { EvaluatorBusyError, evaluate } from "@/lib/evaluator";
 import { calculationOf, type EvaluateAnswer, type VersionFile } from "@/lib/schema";
 import { settings } from "@/lib/settings";
-import "katex/dist/katex.min.css";
 
 type Address = { params: Promise<{ id: string; n: string }> };
 
-async function requireVersion({ params }: Address) {
-  const typed = await params;
-  const id = maybeCalculationId(typed.id);
-  if (id === undefined || !/^[1-9]\d{0,8}$/.test(typed.n)) notFound();
-  const reading = await readVersion(await currentPerson(), id, Number(typed.n));
+/** The version, read once for the page and its metadata; a 404 for those who may not read it. */
+const requireVersion = cache(async (typedId: string, typedNumber: string) => {
+  const id = maybeCalculationId(typedId);
+  if (id === undefined || !/^[1-9]\d{0,8}$/.test(typedNumber)) notFound();
+  const number = Number(typedNumber);
+  const reading = await readVersion(await currentPerson(), id, number);
   if (isRefused(reading)) notFound();
-  const url = new URL(versionPath(id, Number(typed.n)), settings().appUrl).href;
-  return { ...reading, url };
-}
+  return { ...reading, url: new URL(versionPath(id, number), settings().appUrl).href };
+});
 
 /** How the cells are typeset. Reading goes on without it when no evaluator is free. */
 async function presentationOf(file: VersionFile): Promise<EvaluateAnswer["presentation"]> {
@@ -31,13 +31,15 @@ async function presentationOf(file: VersionFile): Promise<EvaluateAnswer["presen
   }
 }
 
-export async function generateMetadata(address: Address): Promise<Metadata> {
-  const { file, withdrawn, visibility, url } = await requireVersion(address);
+export async function generateMetadata({ params }: Address): Promise<Metadata> {
+  const { id, n } = await params;
+  const { file, withdrawn, visibility, url } = await requireVersion(id, n);
   return versionMetadata(file, withdrawn !== null, visibility, url);
 }
 
-export default async function Page(address: Address) {
-  const { file, withdrawn, role, latest, url } = await requireVersion(address);
+export default async function Page({ params }: Address) {
+  const { id, n } = await params;
+  const { file, withdrawn, role, latest, url } = await requireVersion(id, n);
   return (
     <VersionPage
       file={file}
