@@ -33,7 +33,7 @@ export function concise(value: number, uncertainty: number): string | undefined 
   const shift = usesPower ? valuePower : 0;
   const decimals = shift - place;
   if (decimals < 0 || decimals > 15) return undefined;
-  const mantissa = Number(`${value}e${-shift}`).toFixed(decimals);
+  const mantissa = (value / 10 ** shift).toFixed(decimals);
   const text = `${mantissa}(${last})${shift === 0 ? "" : `e${shift}`}`;
   const exact =
     Number(`${mantissa}e${shift}`) === value && Number(`${last}e${place}`) === uncertainty;
