@@ -3,6 +3,7 @@ import { db } from "@/db";
 import { migrate } from "@/db/migrate";
 import { sessionAdapter } from "@/lib/auth/adapter";
 import { startEvaluators } from "@/lib/evaluator";
+import { forgetAnswersBefore, forgetUnfinished, notePeerAddresses } from "@/lib/http";
 import { deliverDueMail } from "@/lib/mail";
 import { settings } from "@/lib/settings";
 
@@ -30,8 +31,7 @@ async function sweep(): Promise<void> {
   const now = Date.now();
   await sessionAdapter.deleteExpiredSessions();
   await db()("email_tokens").where("expires_at", "<", new Date(now).toISOString()).delete();
-  const old = new Date(now - idempotencyMs).toISOString();
-  await db()("idempotency_keys").where("created_at", "<", old).delete();
+  await forgetAnswersBefore(new Date(now - idempotencyMs));
 }
 
 /** Bring the database to its newest shape, warm the evaluators, send mail and sweep out. */
@@ -42,7 +42,9 @@ export async function startBackground(): Promise<void> {
   if (mailUrl === undefined && !localMail) {
     console.warn("MAIL_URL is not set: mail waits in the outbox and is not sent.");
   }
+  notePeerAddresses();
   await migrate(db());
+  await forgetUnfinished();
   await startEvaluators();
   repeat(mailEveryMs, deliverDueMail);
   repeat(sweepEveryMs, sweep);

@@ -11,6 +11,8 @@ const schema = z.object({
   MAIL_URL: z.url({ protocol: /^smtps?$/ }).optional(),
   /** Address that mail is sent from. */
   MAIL_FROM: z.string().default("Leading Order <no-reply@localhost>"),
+  /** How many proxies of ours stand in front: whose word on the sender's address is believed. */
+  PROXIES: z.coerce.number().int().min(0).max(10).default(0),
   EVALUATORS: z.coerce.number().int().min(1).max(64).default(2),
   /** Asks for the demo data, which is otherwise only made by a local start. */
   SEED_DEMO: z.enum(["0", "1"]).default("0"),
@@ -25,10 +27,29 @@ export interface Settings {
   readonly databaseFile: string;
   readonly mailUrl: string | undefined;
   readonly mailFrom: string;
+  readonly proxies: number;
   readonly evaluators: number;
   readonly seedDemo: boolean;
   /** True where the fake mail is in force: a local start without MAIL_URL. */
   readonly localMail: boolean;
+}
+
+const thisComputer = new Set(["localhost", "127.0.0.1", "[::1]"]);
+
+/** What is wrong with the settings taken together. */
+function contradictions(s: z.infer<typeof schema>): string[] {
+  const local = s.LOCAL === "1";
+  if (s.NODE_ENV === "production" && !local && s.APP_URL === undefined) {
+    return ["APP_URL: a production server must know its address."];
+  }
+  if (local && s.APP_URL !== undefined && !thisComputer.has(new URL(s.APP_URL).hostname)) {
+    return ["LOCAL: it shows everybody's mail, and is for this computer only. Leave it out."];
+  }
+  return [];
+}
+
+function wrong(lines: readonly string[]): Error {
+  return new Error(`The settings are not right.\n${lines.join("\n")}`);
 }
 
 /** Read the settings. Throws with one line for each that is wrong. */
@@ -36,16 +57,12 @@ export function readSettings(environment: NodeJS.ProcessEnv): Settings {
   const given = Object.fromEntries(Object.entries(environment).filter(([, value]) => value !== ""));
   const parsed = schema.safeParse(given);
   if (!parsed.success) {
-    const lines = parsed.error.issues.map((issue) => `${issue.path.join(".")}: ${issue.message}`);
-    throw new Error(`The settings are not right.\n${lines.join("\n")}`);
+    throw wrong(parsed.error.issues.map((issue) => `${issue.path.join(".")}: ${issue.message}`));
   }
   const s = parsed.data;
+  const against = contradictions(s);
+  if (against.length > 0) throw wrong(against);
   const production = s.NODE_ENV === "production";
-  if (production && s.LOCAL === "0" && s.APP_URL === undefined) {
-    throw new Error(
-      "The settings are not right.\nAPP_URL: a production server must know its address.",
-    );
-  }
   return {
     production,
     port: s.PORT,
@@ -53,6 +70,7 @@ export function readSettings(environment: NodeJS.ProcessEnv): Settings {
     databaseFile: s.DATABASE_FILE,
     mailUrl: s.MAIL_URL,
     mailFrom: s.MAIL_FROM,
+    proxies: s.PROXIES,
     evaluators: s.EVALUATORS,
     seedDemo: s.SEED_DEMO === "1" || s.LOCAL === "1",
     localMail: s.MAIL_URL === undefined && (s.LOCAL === "1" || !production),

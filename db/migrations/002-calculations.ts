@@ -17,7 +17,7 @@ const fixed = [
   "pinned_at",
 ];
 
-/** A version never changes: only its withdrawal may be entered, once. */
+/** A version never changes and never goes: only its withdrawal may be entered, once and whole. */
 const immutability = [
   `CREATE TRIGGER versions_are_immutable BEFORE UPDATE ON versions
    WHEN ${fixed.map((column) => `NEW.${column} IS NOT OLD.${column}`).join(" OR ")}
@@ -26,11 +26,21 @@ const immutability = [
    WHEN OLD.withdrawn_at IS NOT NULL
      AND (NEW.withdrawn_at IS NOT OLD.withdrawn_at OR NEW.withdrawn_reason IS NOT OLD.withdrawn_reason)
    BEGIN SELECT RAISE(ABORT, 'a withdrawal cannot be changed'); END`,
+  `CREATE TRIGGER withdrawals_have_reasons BEFORE UPDATE ON versions
+   WHEN (NEW.withdrawn_at IS NULL) <> (NEW.withdrawn_reason IS NULL)
+   BEGIN SELECT RAISE(ABORT, 'a withdrawal has a time and a reason'); END`,
   `CREATE TRIGGER versions_are_kept BEFORE DELETE ON versions
    BEGIN SELECT RAISE(ABORT, 'a version cannot be deleted'); END`,
   `CREATE TRIGGER versions_are_not_replaced BEFORE INSERT ON versions
    WHEN EXISTS (SELECT 1 FROM versions WHERE calculation_id = NEW.calculation_id AND number = NEW.number)
    BEGIN SELECT RAISE(ABORT, 'a version cannot be replaced'); END`,
+  // The foreign key says the same, but a program that opens the file may have keys switched off.
+  `CREATE TRIGGER calculations_with_versions_are_kept BEFORE DELETE ON calculations
+   WHEN EXISTS (SELECT 1 FROM versions WHERE calculation_id = OLD.id)
+   BEGIN SELECT RAISE(ABORT, 'a calculation with versions cannot be deleted'); END`,
+  `CREATE TRIGGER calculations_keep_their_names BEFORE UPDATE OF id ON calculations
+   WHEN NEW.id IS NOT OLD.id
+   BEGIN SELECT RAISE(ABORT, 'a calculation keeps its id'); END`,
 ];
 
 /** Calculations, every saved draft as a numbered revision, and the versions pinned from them. */
@@ -83,6 +93,8 @@ export async function up(knex: Knex): Promise<void> {
 }
 
 export async function down(knex: Knex): Promise<void> {
+  // Dropping a table deletes its rows, which the triggers of the table below it would refuse.
+  await knex.raw("DROP TRIGGER calculations_with_versions_are_kept");
   await knex.schema.dropTable("versions");
   await knex.schema.dropTable("revisions");
   await knex.schema.dropTable("calculations");

@@ -21,7 +21,9 @@ export async function up(knex: Knex): Promise<void> {
     table.string("key", 200).notNullable();
     table.string("route", 200).notNullable();
     table.string("request_hash", 64).notNullable();
+    // Empty until the first request with the key is answered.
     table.integer("status");
+    table.text("headers");
     table.text("body");
     table.string("created_at").notNullable();
     table.primary(["user_id", "route", "key"]);

@@ -5,8 +5,9 @@ const safeMethods = new Set(["GET", "HEAD", "OPTIONS"]);
 
 function sameOrigin(origin: string, request: Request): boolean {
   try {
-    const { host } = new URL(origin);
-    return origin === settings().appUrl || host === request.headers.get("host");
+    const from = new URL(origin);
+    const ours = new URL(settings().appUrl).origin;
+    return from.origin === ours || from.host === request.headers.get("host");
   } catch {
     return false;
   }

@@ -1,4 +1,6 @@
 export { decodeCursor, encodeCursor } from "./cursor";
+export { forgetAnswersBefore, forgetUnfinished } from "./idempotency";
+export { addressOf, notePeerAddresses } from "./peer-address";
 export {
   HttpProblem,
   type ProblemDetails,
@@ -6,6 +8,6 @@ export {
   problemResponse,
   problems,
 } from "./problems";
-export { addressOf, countTry, forgiveTries } from "./rate-limits";
+export { countTry, forgiveEverybody, forgiveTries, type RateLimit } from "./rate-limits";
 export { safeReturnPath } from "./return-path";
 export { json, route } from "./route";

@@ -18,6 +18,8 @@ export const problems = {
   limit: { status: 422, title: "A limit of the product is exceeded" },
   "token-invalid": { status: 400, title: "This link is no longer valid" },
   busy: { status: 503, title: "Too many evaluations are waiting" },
+  "storage-full": { status: 507, title: "There is no room left to save this" },
+  "storage-busy": { status: 503, title: "The database is busy" },
   internal: { status: 500, title: "Something went wrong on our side" },
 } as const satisfies Record<string, { status: number; title: string }>;
 

@@ -29,7 +29,7 @@ function tooLarge(most: number): HttpProblem {
 /** The JSON body of a request, read strictly and up to `most` bytes. Throws HttpProblem. */
 export async function readBody(request: Request, most: number): Promise<unknown> {
   const type = request.headers.get("content-type") ?? "";
-  if (!/^application\/json\b/i.test(type)) throw new HttpProblem("unsupported-media-type");
+  if (!/^application\/json\s*(;|$)/i.test(type)) throw new HttpProblem("unsupported-media-type");
   const bytes = await readBytes(request, most);
   let text: string;
   try {

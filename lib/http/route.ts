@@ -1,5 +1,6 @@
 import { randomUUID } from "node:crypto";
 import type { z } from "zod";
+import { type StorageFault, storageFault } from "@/db";
 import { personFromRequest, type SignedIn } from "@/lib/auth";
 import { limits } from "@/lib/schema";
 import { refuseCrossSite } from "./cross-site";
@@ -71,11 +72,22 @@ async function context<P extends Permission, Params, Query, Body>(
   };
 }
 
+/** The disk or another process is in the way: nothing was saved, and trying again may help. */
+function answerStorageFault(fault: StorageFault, error: unknown): Response {
+  console.error(fault, error);
+  return problemResponse(fault, {
+    detail: "Nothing was saved. What you typed is still in this browser; try again later.",
+    headers: { "retry-after": fault === "storage-full" ? "60" : "2" },
+  });
+}
+
 function answerError(error: unknown, request: Request): Response {
   if (error instanceof HttpProblem) return problemResponse(error.type, error.details);
   if (error instanceof Error && error.name === "EvaluatorBusyError") {
     return problemResponse("busy", { headers: { "retry-after": "2" } });
   }
+  const fault = storageFault(error);
+  if (fault) return answerStorageFault(fault, error);
   const incident = randomUUID();
   console.error(`incident ${incident}: ${request.method} ${new URL(request.url).pathname}`, error);
   return problemResponse("internal", {
@@ -105,7 +117,7 @@ export function route<
       const work = async () => handler(ready);
       const { person } = ready;
       if (request.method !== "POST" || !person) return await work();
-      return await once(request, person.id, sent, work);
+      return await once({ request, userId: person.id, body: sent }, work);
     } catch (error) {
       return answerError(error, request);
     }
