@@ -15,9 +15,21 @@ export async function verifyPassword(passwordHash: string, password: string): Pr
 
 let decoy: Promise<string> | undefined;
 
-/** Take as long as a real check does, where there is no account to check. */
-export async function verifyNothing(password: string): Promise<false> {
+/**
+ * Which of some hashes is the password's: its place, or -1. Always does the work of `most` checks, so
+ * that the time does not tell how many accounts there are, or whether one fits.
+ */
+export async function findPassword(
+  hashes: readonly string[],
+  password: string,
+  most: number,
+): Promise<number> {
   decoy ??= hashPassword("no account has this password");
-  await verifyPassword(await decoy, password);
-  return false;
+  const padding = Array.from(
+    { length: Math.max(0, most - hashes.length) },
+    () => decoy as Promise<string>,
+  );
+  const all = [...hashes, ...(await Promise.all(padding))];
+  const fits = await Promise.all(all.map((one) => verifyPassword(one, password)));
+  return fits.slice(0, hashes.length).indexOf(true);
 }

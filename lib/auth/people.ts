@@ -28,6 +28,11 @@ export function emailKey(email: string): string {
   return email.trim().toLowerCase();
 }
 
+/** Unconfirmed claims to one address beyond this are refused. */
+export const mostClaims = 2;
+/** Accounts of one address: the confirmed one and the claims. */
+export const mostAccounts = 1 + mostClaims;
+
 /** Accounts that claim an address: the confirmed one first, then the oldest. */
 export async function findAccounts(tx: Knex, email: string): Promise<PersonRow[]> {
   return tx("users")
@@ -38,9 +43,7 @@ export async function findAccounts(tx: Knex, email: string): Promise<PersonRow[]
     .select<PersonRow[]>();
 }
 
-/** Unconfirmed claims to one address beyond this are refused. */
-export const mostAccounts = 5;
-
+/** Enter a new account, its address unconfirmed. */
 export async function insertPerson(
   tx: Knex,
   person: { email: string; name: string; passwordHash: string },

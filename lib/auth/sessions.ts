@@ -10,6 +10,8 @@ export interface SignedIn extends Person {
 
 /** Times of a session are refreshed at most this often. */
 const refreshMs = 60_000;
+/** A session ends this long after signing in, however much it is used. */
+const longestMs = 30 * 24 * 3600 * 1000;
 
 /** Open a session; gives the `Set-Cookie` header that carries it. */
 export async function openSession(userId: string, userAgent: string): Promise<string> {
@@ -31,12 +33,17 @@ async function noteSeen(secret: string, lastSeenAt: string): Promise<void> {
     .update({ last_seen_at: new Date().toISOString() });
 }
 
+/** Not from the future, which would mean a clock set back and a session that outlives its time. */
+function isInItsTime(createdAt: string): boolean {
+  const ageMs = Date.now() - Date.parse(createdAt);
+  return ageMs > -refreshMs && ageMs < longestMs;
+}
+
 /** The person a session secret belongs to; null for an unknown or expired one. */
 export async function personOfSession(secret: string | null | undefined): Promise<SignedIn | null> {
   if (!secret) return null;
   const { session, user } = await lucia().validateSession(secret);
-  // A session from the future means a clock set back: it would outlive its time.
-  if (!session || Date.parse(session.createdAt) > Date.now() + refreshMs) return null;
+  if (!session || !isInItsTime(session.createdAt)) return null;
   await noteSeen(secret, session.lastSeenAt);
   const { id, name, email, emailConfirmed } = user;
   return { id, name, email, emailConfirmed, sessionSecret: secret };
@@ -47,18 +54,14 @@ export async function personFromRequest(request: Request): Promise<SignedIn | nu
   return personOfSession(lucia().readSessionCookie(request.headers.get("cookie") ?? ""));
 }
 
+/** Under TLS the name has the prefix that ties the cookie to this host. */
 export function sessionCookieName(): string {
   return lucia().sessionCookieName;
 }
 
+/** End the session a person came with: its secret is worth nothing from now on. */
 export async function closeSession(person: SignedIn): Promise<void> {
   await lucia().invalidateSession(person.sessionSecret);
-}
-
-/** End every session of a person; with `but`, all but that one. */
-export async function closeSessions(userId: string, but?: string): Promise<void> {
-  const sessions = db()("sessions").where({ user_id: userId });
-  await (but === undefined ? sessions : sessions.whereNot({ id: sessionKey(but) })).delete();
 }
 
 /** A person's open sessions, the latest first. */

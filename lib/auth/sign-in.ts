@@ -1,25 +1,23 @@
-import { db, transaction } from "@/db";
+import { setTimeout } from "node:timers/promises";
+import { db, type Knex, transaction } from "@/db";
 import { enqueue } from "@/lib/mail";
 import { passwordChanged, resetPassword as resetMail } from "@/lib/mail/templates";
 import type { Person } from "@/lib/schema";
-import { hashPassword, verifyNothing, verifyPassword } from "./passwords";
-import { findAccounts, type PersonRow, reshapePerson } from "./people";
-import { closeSessions, type SignedIn } from "./sessions";
+import { findPassword, hashPassword, verifyPassword } from "./passwords";
+import { findAccounts, mostAccounts, type PersonRow, reshapePerson } from "./people";
+import type { SignedIn } from "./sessions";
 import { markConfirmed } from "./sign-up";
 import { issueToken, spendToken } from "./tokens";
 
-/** The person with this address and password; undefined otherwise, in similar time. */
+/** The person with this address and password; undefined otherwise, in the same time. */
 export async function signIn(email: string, password: string): Promise<Person | undefined> {
   const accounts = await findAccounts(db(), email);
-  if (accounts.length === 0) await verifyNothing(password);
-  for (const account of accounts) {
-    if (await verifyPassword(account.password_hash, password)) return reshapePerson(account);
-  }
-  return undefined;
+  const hashes = accounts.map((account) => account.password_hash);
+  const account = accounts[await findPassword(hashes, password, mostAccounts)];
+  return account && reshapePerson(account);
 }
 
-/** Mail a link to set a new password, if the address is known. The caller is told nothing. */
-export async function requestReset(email: string): Promise<void> {
+async function mailReset(email: string): Promise<void> {
   await transaction(async (tx) => {
     const accounts = await findAccounts(tx, email);
     const confirmed = accounts.filter((account) => account.email_confirmed_at !== null);
@@ -27,6 +25,20 @@ export async function requestReset(email: string): Promise<void> {
       await enqueue(tx, resetMail(account, await issueToken(tx, account.id, "reset")));
     }
   });
+}
+
+/** A request for a link takes this long, whether or not there is something to write and to mail. */
+const resetRequestMs = 250;
+
+/** Mail a link to set a new password, if the address is known. The caller is told nothing. */
+export async function requestReset(email: string): Promise<void> {
+  await Promise.all([mailReset(email), setTimeout(resetRequestMs)]);
+}
+
+async function replacePassword(tx: Knex, id: string, passwordHash: string): Promise<void> {
+  await tx("users").where({ id }).update({ password_hash: passwordHash });
+  await tx("sessions").where({ user_id: id }).delete();
+  await tx("email_tokens").where({ user_id: id, purpose: "reset" }).delete();
 }
 
 /**
@@ -38,8 +50,7 @@ export async function resetPassword(token: string, password: string): Promise<Pe
   const userId = await transaction(async (tx) => {
     const id = await spendToken(tx, token, "reset");
     if (id === undefined) return undefined;
-    await tx("users").where({ id }).update({ password_hash: passwordHash });
-    await tx("sessions").where({ user_id: id }).delete();
+    await replacePassword(tx, id, passwordHash);
     await markConfirmed(tx, id);
     return id;
   });
@@ -47,7 +58,10 @@ export async function resetPassword(token: string, password: string): Promise<Pe
   return row ? reshapePerson(row) : undefined;
 }
 
-/** Change one's password; ends every other session. False where the current one is wrong. */
+/**
+ * Change one's password; ends every session, this one too, and links to set a new password. The caller
+ * opens a new session. False where the current password is wrong.
+ */
 export async function changePassword(
   person: SignedIn,
   current: string,
@@ -57,9 +71,8 @@ export async function changePassword(
   if (!row || !(await verifyPassword(row.password_hash, current))) return false;
   const passwordHash = await hashPassword(next);
   await transaction(async (tx) => {
-    await tx("users").where({ id: person.id }).update({ password_hash: passwordHash });
+    await replacePassword(tx, person.id, passwordHash);
     if (person.emailConfirmed) await enqueue(tx, passwordChanged(person));
   });
-  await closeSessions(person.id, person.sessionSecret);
   return true;
 }

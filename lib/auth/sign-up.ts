@@ -3,13 +3,14 @@ import { enqueue } from "@/lib/mail";
 import { confirmAddress, somebodyTriedToSignUp } from "@/lib/mail/templates";
 import type { Person } from "@/lib/schema";
 import { hashPassword } from "./passwords";
-import { findAccounts, insertPerson, mostAccounts, type PersonRow, reshapePerson } from "./people";
+import { findAccounts, insertPerson, mostClaims, type PersonRow, reshapePerson } from "./people";
 import { issueToken, spendToken } from "./tokens";
 
 /**
  * Make an account and mail a link to confirm its address. Whether the address is known is not told:
- * an account is made in any case, and where a confirmed one exists its owner is told by mail and the
- * new one cannot be confirmed. Undefined when an address has too many unconfirmed claims.
+ * an account is made in any case, with the same answer. Where a confirmed one exists its owner is told
+ * by mail, and the new one can never be confirmed. Undefined when others claim the address without
+ * having confirmed it; its owner gets at those by a link to set a new password.
  */
 export async function signUp(entry: {
   email: string;
@@ -19,9 +20,10 @@ export async function signUp(entry: {
   const passwordHash = await hashPassword(entry.password);
   return transaction(async (tx) => {
     const accounts = await findAccounts(tx, entry.email);
-    if (accounts.length >= mostAccounts) return undefined;
-    const row = await insertPerson(tx, { ...entry, passwordHash });
     const owner = accounts.find((account) => account.email_confirmed_at !== null);
+    // The owner is not counted: a refusal that came one claim earlier would tell of them.
+    if (accounts.length - (owner ? 1 : 0) >= mostClaims) return undefined;
+    const row = await insertPerson(tx, { ...entry, passwordHash });
     if (owner) await enqueue(tx, somebodyTriedToSignUp(owner));
     else await enqueue(tx, confirmAddress(row, await issueToken(tx, row.id, "confirm")));
     return reshapePerson(row);

@@ -1,11 +1,12 @@
 import { openSession, resetPassword } from "@/lib/auth";
-import { HttpProblem, json, route } from "@/lib/http";
+import { addressOf, countTry, HttpProblem, json, route } from "@/lib/http";
 import { resetSchema } from "@/lib/schema";
 
 /** Set a new password by a mailed token; ends every session and opens a new one here. */
 export const POST = route(
   { permission: "anyone", body: resetSchema },
   async ({ request, body }) => {
+    await countTry("token-address", addressOf(request));
     const person = await resetPassword(body.token, body.password);
     if (!person) {
       throw new HttpProblem("token-invalid", {
