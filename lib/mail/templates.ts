@@ -3,8 +3,15 @@ import { compose, type MailMessage, oneLine } from "./message";
 
 interface Addressee {
   readonly email: string;
+}
+
+/** Somebody who has confirmed the address: their name is their own, and may stand in the mail. */
+interface Owner extends Addressee {
   readonly name: string;
 }
+
+/** To an address that anybody may have typed: no word of theirs is sent to it. */
+const stranger = "Good day,";
 
 function link(path: string): string {
   return settings().appUrl + path;
@@ -17,7 +24,7 @@ export function confirmAddress(to: Addressee, token: string): MailMessage {
     recipient: to.email,
     subject: "Confirm your address for Leading Order",
     paragraphs: [
-      `Dear ${oneLine(to.name)},`,
+      stranger,
       "Please confirm this address by the link below. It is good for 48 hours. If you did not sign up, do nothing; the account will stay unconfirmed.",
     ],
     link: link(`/confirm?token=${token}`),
@@ -25,7 +32,7 @@ export function confirmAddress(to: Addressee, token: string): MailMessage {
 }
 
 /** To the owner of an address that somebody signed up with again. */
-export function somebodyTriedToSignUp(to: Addressee): MailMessage {
+export function somebodyTriedToSignUp(to: Owner): MailMessage {
   return compose({
     kind: "sign-up-again",
     recipient: to.email,
@@ -45,7 +52,7 @@ export function resetPassword(to: Addressee, token: string): MailMessage {
     recipient: to.email,
     subject: "Set a new password for Leading Order",
     paragraphs: [
-      `Dear ${oneLine(to.name)},`,
+      stranger,
       "By the link below you can set a new password. It is good for one hour and for one use. If you did not ask for it, do nothing.",
     ],
     link: link(`/reset/new?token=${token}`),
@@ -53,7 +60,7 @@ export function resetPassword(to: Addressee, token: string): MailMessage {
 }
 
 /** To the owner, after the password was changed. */
-export function passwordChanged(to: Addressee): MailMessage {
+export function passwordChanged(to: Owner): MailMessage {
   return compose({
     kind: "password-changed",
     recipient: to.email,
