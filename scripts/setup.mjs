@@ -32,13 +32,23 @@ function isInstalled() {
 export function installPackages() {
   if (isInstalled()) return;
   console.log("Installing packages…");
-  const exact = spawnSync("npm", ["ci", "--no-audit", "--no-fund"], { cwd: root, stdio: "inherit" });
+  const exact = spawnSync("npm", ["ci", "--no-audit", "--no-fund"], {
+    cwd: root,
+    stdio: "inherit",
+  });
   // Some platforms lack an optional build that the lock names; a plain install leaves it out.
   if (exact.status !== 0) run("npm", ["install", "--no-audit", "--no-fund"]);
 }
 
 const sourceFolders = ["app", "components", "lib", "db", "public"];
-const sourceFiles = ["package-lock.json", "next.config.ts", "proxy.ts", "instrumentation.ts", "tsconfig.json", "knexfile.ts"];
+const sourceFiles = [
+  "package-lock.json",
+  "next.config.ts",
+  "proxy.ts",
+  "instrumentation.ts",
+  "tsconfig.json",
+  "knexfile.ts",
+];
 
 function newest(place) {
   const full = path.join(root, place);
@@ -60,7 +70,11 @@ export function build() {
   if (isBuilt()) return;
   console.log("Building…");
   run(process.execPath, ["--import", "tsx", "scripts/build-evaluator.ts"]);
-  run(process.execPath, ["node_modules/next/dist/bin/next", "build"], { NODE_ENV: "production", LOCAL: "1", NEXT_TELEMETRY_DISABLED: "1" });
+  run(process.execPath, ["node_modules/next/dist/bin/next", "build"], {
+    NODE_ENV: "production",
+    LOCAL: "1",
+    NEXT_TELEMETRY_DISABLED: "1",
+  });
 }
 
 export function packageVersion() {

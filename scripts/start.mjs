@@ -42,5 +42,7 @@ for (let tries = 0; !(await isUp()); tries++) {
   await new Promise((resolve) => setTimeout(resolve, waitMs));
 }
 console.log(`Leading Order is served on http://localhost:${port}`);
-if (wantsDemo) run(process.execPath, ["--conditions=react-server", "--import", "tsx", "scripts/seed.ts"], env);
-if (env.LOCAL === "1") console.log(`Mail is not sent; it is shown on http://localhost:${port}/mail`);
+if (wantsDemo)
+  run(process.execPath, ["--conditions=react-server", "--import", "tsx", "scripts/seed.ts"], env);
+if (env.LOCAL === "1")
+  console.log(`Mail is not sent; it is shown on http://localhost:${port}/mail`);

@@ -24,20 +24,30 @@ function installDebian() {
   const missing = Object.keys(debianPackages).filter((name) => !debianPackages[name]());
   if (missing.length === 0) return;
   if (process.getuid?.() !== 0) {
-    giveUp(`Some Debian packages are missing. As root:\n  apt-get update && apt-get install -y ${missing.join(" ")}`);
+    giveUp(
+      `Some Debian packages are missing. As root:\n  apt-get update && apt-get install -y ${missing.join(" ")}`,
+    );
   }
   console.log(`Installing ${missing.join(", ")}…`);
   const env = { ...process.env, DEBIAN_FRONTEND: "noninteractive" };
   spawnSync("apt-get", ["update", "-qq"], { stdio: "inherit", env });
-  const installed = spawnSync("apt-get", ["install", "-y", "-qq", "--no-install-recommends", ...missing], {
-    stdio: ["ignore", "ignore", "inherit"],
-    env,
-  });
+  const installed = spawnSync(
+    "apt-get",
+    ["install", "-y", "-qq", "--no-install-recommends", ...missing],
+    {
+      stdio: ["ignore", "ignore", "inherit"],
+      env,
+    },
+  );
   if (installed.status !== 0) giveUp(`apt-get could not install ${missing.join(" ")}.`);
 }
 
 function execute(args, env = {}) {
-  const done = spawnSync(process.execPath, args, { cwd: root, stdio: "inherit", env: { ...process.env, ...env } });
+  const done = spawnSync(process.execPath, args, {
+    cwd: root,
+    stdio: "inherit",
+    env: { ...process.env, ...env },
+  });
   return done.status === 0;
 }
 
@@ -53,7 +63,14 @@ function readReport(file) {
 function vitest(folder) {
   return () => {
     const file = path.join(reports, `${folder}.json`);
-    const ok = execute(["node_modules/vitest/vitest.mjs", "run", `tests/${folder}`, "--reporter=default", "--reporter=json", `--outputFile.json=${file}`]);
+    const ok = execute([
+      "node_modules/vitest/vitest.mjs",
+      "run",
+      `tests/${folder}`,
+      "--reporter=default",
+      "--reporter=json",
+      `--outputFile.json=${file}`,
+    ]);
     const report = readReport(file);
     if (!report) return { passed: 0, failed: 1 };
     const failed = report.numFailedTests;
@@ -65,7 +82,9 @@ function vitest(folder) {
 function playwright() {
   build();
   const file = path.join(reports, "e2e.json");
-  const ok = execute(["node_modules/@playwright/test/cli.js", "test"], { PLAYWRIGHT_JSON_OUTPUT_NAME: file });
+  const ok = execute(["node_modules/@playwright/test/cli.js", "test"], {
+    PLAYWRIGHT_JSON_OUTPUT_NAME: file,
+  });
   const report = readReport(file);
   if (!report) return { passed: 0, failed: 1 };
   const { expected, unexpected, flaky } = report.stats;

@@ -25,10 +25,14 @@ function astropy(): { bestMs: number; values: number[] } {
 
 /** Both programs must compute the same numbers, or the times mean nothing. */
 function requireSame(values: readonly number[]): void {
-  const { cells } = createEngine().evaluate(hundredRelations(() => 1), "");
+  const { cells } = createEngine().evaluate(
+    hundredRelations(() => 1),
+    "",
+  );
   for (const [i, value] of values.entries()) {
     const ours = cells[`r${i}`];
-    if (ours?.status !== "ok" || !("si" in ours)) throw new Error(`${relationFormulas[i]}: ${JSON.stringify(ours)}`);
+    if (ours?.status !== "ok" || !("si" in ours))
+      throw new Error(`${relationFormulas[i]}: ${JSON.stringify(ours)}`);
     if (Math.abs(ours.si.value / value - 1) > 1e-9) {
       throw new Error(`${relationFormulas[i]}: ${ours.si.value} here, ${value} there`);
     }
@@ -40,8 +44,18 @@ export function measureEngine(): Measurement[] {
   const reference = astropy();
   requireSame(reference.values);
   const engine = createEngine();
-  const whole = bestMs((round) => engine.evaluate(hundredRelations(() => 1 + round * 1e-6), ""));
-  const one = bestMs((round) => engine.evaluate(hundredRelations((i) => (i === 0 ? 1 + round * 1e-6 : 1)), ""));
+  const whole = bestMs((round) =>
+    engine.evaluate(
+      hundredRelations(() => 1 + round * 1e-6),
+      "",
+    ),
+  );
+  const one = bestMs((round) =>
+    engine.evaluate(
+      hundredRelations((i) => (i === 0 ? 1 + round * 1e-6 : 1)),
+      "",
+    ),
+  );
   return [
     {
       what: "100 relations over 20 givens, dimensions and values, warm",

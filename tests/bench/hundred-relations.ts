@@ -23,7 +23,9 @@ function formulaOf(index: number): string {
   return pattern.replace(/\b([A-E])\b/g, (letter) => `${letter}${set}`);
 }
 
-export const relationFormulas: readonly string[] = Array.from({ length: 100 }, (_, i) => formulaOf(i));
+export const relationFormulas: readonly string[] = Array.from({ length: 100 }, (_, i) =>
+  formulaOf(i),
+);
 
 export const givens = Array.from({ length: 20 }, (_, i) => ({
   symbol: `${"ABCDE"[i % 5]}${Math.floor(i / 5)}`,

@@ -15,7 +15,8 @@ const round = (x: number) => Number(x.toPrecision(3));
 
 /** The measurements as a table in Markdown. */
 export function table(measurements: readonly Measurement[]): string {
-  const head = "| what | ours | reference | figure | target | met |\n| --- | --- | --- | --- | --- | --- |";
+  const head =
+    "| what | ours | reference | figure | target | met |\n| --- | --- | --- | --- | --- | --- |";
   const rows = measurements.map(
     (m) =>
       `| ${m.what} | ${round(m.ours)} ${m.unit} | ${m.referenceName}: ${round(m.reference)} ${m.unit} | ${round(m.figure)} | ${m.target} | ${m.met ? "yes" : "no"} |`,
