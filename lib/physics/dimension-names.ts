@@ -125,7 +125,8 @@ const gaussianOnly: readonly NameRow[] = [
   ["charge-to-mass ratio", "esu/g"],
 ];
 
-interface Named {
+/** What a dimension is called and stated in. */
+export interface Named {
   readonly name: string;
   readonly unit: string;
 }
@@ -146,13 +147,15 @@ function tableFor(em: EmConvention): Map<Dimension, Named> {
 
 const tables = new Map<EmConvention, Map<Dimension, Named>>();
 
+/** Every dimension that has a name under a convention, with that name and a customary unit. */
+export function namedDimensions(em: EmConvention): ReadonlyMap<Dimension, Named> {
+  const table = tables.get(em) ?? tableFor(em);
+  tables.set(em, table);
+  return table;
+}
+
 function rowOf(of: Dimension, em: EmConvention): Named | undefined {
-  let table = tables.get(em);
-  if (!table) {
-    table = tableFor(em);
-    tables.set(em, table);
-  }
-  return table.get(of);
+  return namedDimensions(em).get(of);
 }
 
 /** “luminosity”, “opacity”, …; undefined for a dimension that the trade has no name for. */

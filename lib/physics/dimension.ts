@@ -43,7 +43,7 @@ export function dimension(exponents: Partial<Record<BaseQuantity, number | strin
 export const dimensionless: Dimension = dimension({});
 
 /** More results than any calculation needs; beyond it a table is emptied, so that none grows for ever. */
-const mostRemembered = 20_000;
+const mostRemembered = 5_000;
 
 /** Remembers what `make` answers for a dimension and a second key: two look-ups instead of algebra. */
 function remembering<K>(make: (of: Dimension, key: K) => Dimension) {

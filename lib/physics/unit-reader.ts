@@ -89,8 +89,9 @@ export class UnitReader {
 
   /** Marks at least one character, the last one where the text ends too soon. */
   #fail(from: number, to: number): never {
-    const start = Math.max(0, Math.min(from, this.text.trimEnd().length - 1));
-    const end = Math.max(start + 1, Math.min(to, this.text.length));
+    const length = this.text.trimEnd().length;
+    const start = Math.max(0, Math.min(from, length - 1));
+    const end = Math.max(start + 1, Math.min(to, length));
     throw new UnitFault({ ok: false, code: "syntax", from: start, to: end, suggestions: [] });
   }
 
