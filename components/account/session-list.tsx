@@ -22,19 +22,22 @@ export function SessionList({ sessions }: { sessions: readonly SessionInfo[] }) 
       <ProblemMessage problem={sending.problem} />
       <ul className="divide-y divide-rule border-y border-rule font-sans text-sm">
         {sessions.map((session) => (
-          <li key={session.id} className="flex flex-wrap items-baseline gap-x-4 gap-y-1 py-2.5">
-            <span className="min-w-40 flex-1 font-medium">{browserName(session.userAgent)}</span>
-            <span className="text-faint">
+          <li key={session.id} className="py-2.5">
+            <div className="flex items-baseline justify-between gap-4">
+              <span className="font-medium">{browserName(session.userAgent)}</span>
+              {session.current ? (
+                <span>this one</span>
+              ) : (
+                <Button look="quiet" disabled={sending.busy} onClick={() => end(session.id)}>
+                  end
+                  <span className="sr-only"> the session of {browserName(session.userAgent)}</span>
+                </Button>
+              )}
+            </div>
+            <p className="text-faint">
               last seen <Time iso={session.lastSeenAt} />, signed in{" "}
               <Time iso={session.createdAt} withTime={false} />
-            </span>
-            {session.current ? (
-              <span>this one</span>
-            ) : (
-              <Button look="quiet" disabled={sending.busy} onClick={() => end(session.id)}>
-                end<span className="sr-only"> the session of {browserName(session.userAgent)}</span>
-              </Button>
-            )}
+            </p>
           </li>
         ))}
       </ul>
