@@ -49,6 +49,7 @@ const brochure = "SI Brochure, 9th edition (BIPM 2019)";
 const sp811 = "NIST SP 811 (2008), appendix B";
 const iauStyle = "IAU Style Manual (Wilkins 1989)";
 const iau2015 = "IAU 2015 Resolution B3";
+const byDefinition = "by definition";
 const large = ["k", "M", "G"];
 const wide = ["p", "n", "u", "m", "k", "M", "G", "T", "P"];
 const si = allPrefixes;
@@ -182,9 +183,10 @@ export const unitRows: readonly UnitRow[] = [
   row("arcsec", "second of arc", dimensionless, Math.PI / 648000, none, brochure),
   row("mas", "thousandth of a second of arc", dimensionless, Math.PI / 648e6, none, iauStyle),
   row("uas", "millionth of a second of arc", dimensionless, Math.PI / 648e9, none, iauStyle),
-  row("rpm", "revolution per minute", frequency, 1 / 60, none, sp811),
+  // A count of revolutions, so 2 pi less than the angular velocity of the same name.
+  row("rpm", "revolution per minute, as a frequency", frequency, 1 / 60, none, byDefinition),
   row("percent", "per cent", dimensionless, 0.01, none, brochure, { aliases: ["%"] }),
-  row("ppm", "part per million", dimensionless, 1e-6, none, sp811),
+  row("ppm", "part per million", dimensionless, 1e-6, none, byDefinition),
 
   row("gauss", "gauss", fluxDensity, 1e-4, wide, sp811, {
     convention: "si",
