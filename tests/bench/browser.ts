@@ -10,6 +10,8 @@ const launch = {
 /** The pause after a keystroke that the folio waits, which the target leaves out. */
 const debounceMs = 150;
 const keystrokes = 40;
+/** Time for scripts that a page asks for after it has loaded. */
+const settleMs = 2_000;
 
 function hundredCells(): CalculationFile {
   const cells: Cell[] = Array.from({ length: 100 }, (_, i): Cell => {
@@ -52,13 +54,13 @@ async function keystrokeMs(browser: Browser, base: string): Promise<number[]> {
     await page.evaluate(() => performance.clearMarks());
     await field.fill(`1${i % 10}.5 Msun`);
     await page.waitForFunction(() => performance.getEntriesByName("lo:painted").length > 0);
-    times.push(
-      await page.evaluate(() => {
-        const at = (name: string) =>
-          performance.getEntriesByName(name).at(-1)?.startTime ?? Number.NaN;
-        return at("lo:painted") - at("lo:keystroke");
-      }),
+    const marks = await page.evaluate(() =>
+      performance.getEntriesByType("mark").map((mark) => ({ name: mark.name, at: mark.startTime })),
     );
+    const [typed, painted] = ["lo:keystroke", "lo:painted"].map(
+      (name) => marks.findLast((mark) => mark.name === name)?.at,
+    );
+    times.push((painted ?? Number.NaN) - (typed ?? Number.NaN));
     await page.waitForTimeout(50);
   }
   await page.close();
@@ -79,7 +81,8 @@ async function scriptBytes(browser: Browser, url: string): Promise<number> {
   session.on("Network.loadingFinished", (event) => {
     if (scripts.get(event.requestId)) bytes += event.encodedDataLength;
   });
-  await page.goto(url, { waitUntil: "networkidle" });
+  await page.goto(url, { waitUntil: "load" });
+  await page.waitForTimeout(settleMs);
   await context.close();
   return bytes;
 }
