@@ -1,4 +1,4 @@
-import { expect, type Page, test } from "@playwright/test";
+import { type BrowserContext, expect, type Page, test } from "@playwright/test";
 import { draftOf, fileOf, limitingLuminosity, start } from "./calculations";
 import { cell, expectSaved, lastLine, write } from "./folio-page";
 import { fromHere, signInByForm, signUp } from "./people";
@@ -15,6 +15,13 @@ async function openDraft(page: Page): Promise<string> {
 async function symbols(page: Page, id: string): Promise<string[]> {
   const { file } = await draftOf(page.request, id);
   return file.cells.flatMap((one) => ("symbol" in one ? [one.symbol] : []));
+}
+
+/** End the only session of the person, as Settings in another browser would. */
+async function endSession({ request }: BrowserContext): Promise<void> {
+  const { items } = await (await request.get("/api/me/sessions")).json();
+  const path = `/api/me/sessions/${encodeURIComponent(items[0].id)}`;
+  expect((await request.delete(path, { headers: fromHere() })).ok()).toBe(true);
 }
 
 test("The network goes away while I type: the work is kept, and saved when it is back", async ({
@@ -63,12 +70,7 @@ test("My session ends in mid-edit: I am told, sign in in a new tab, and everythi
 }) => {
   const { email, password } = await signUp(context);
   const id = await openDraft(page);
-  const sessions = await (await context.request.get("/api/me/sessions")).json();
-  const [{ id: session }] = sessions.items ?? sessions;
-  const ended = await context.request.delete(`/api/me/sessions/${encodeURIComponent(session)}`, {
-    headers: fromHere(),
-  });
-  expect(ended.ok()).toBe(true);
+  await endSession(context);
 
   await write(page, "t = 3 Myr");
   await expect(page.getByText(/you are signed out/)).toBeVisible();
