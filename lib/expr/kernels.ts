@@ -3,6 +3,7 @@ import {
   angularDiameterDistance,
   comovingDistance,
   hubble,
+  hubbleSlope,
   lookbackTime,
   luminosityDistance,
   planckLambda,
@@ -74,6 +75,45 @@ function nthRoot(x: number, n: number): number {
   return x < 0 && odd ? -((-x) ** (1 / n)) : x ** (1 / n);
 }
 
+/**
+ * Digamma function ψ(x): the recurrence up to 10, then the asymptotic series (Abramowitz & Stegun
+ * 6.3.5 and 6.3.18); by reflection (6.3.7) for negative x.
+ */
+function digamma(x: number): number {
+  if (x <= 0) return digamma(1 - x) - Math.PI / Math.tan(Math.PI * x);
+  let shifted = x;
+  let sum = 0;
+  while (shifted < 10) {
+    sum -= 1 / shifted;
+    shifted += 1;
+  }
+  const q = 1 / (shifted * shifted);
+  const series =
+    q *
+    (1 / 12 - q * (1 / 120 - q * (1 / 252 - q * (1 / 240 - q * (1 / 132 - (q * 691) / 32760)))));
+  return sum + Math.log(shifted) - 0.5 / shifted - series;
+}
+
+const planckPerHertz = 6.62607015e-34 / 1.380649e-23;
+const planckPerMetre = planckPerHertz * 299792458;
+
+/** d ln(1/(eᵘ − 1)) / d ln u = −u eᵘ/(eᵘ − 1), for u = hν/kT. */
+function thermalSlope(u: number): number {
+  return -u / -Math.expm1(-u);
+}
+
+/** Slopes that only derivatives need, by the names that `derivatives.ts` writes. */
+const slopeKernels: Record<string, Kernel> = {
+  digamma,
+  planckNuSlope: (nu = Number.NaN, t = Number.NaN) => 3 + thermalSlope((planckPerHertz * nu) / t),
+  planckNuWarmth: (nu = Number.NaN, t = Number.NaN) => -thermalSlope((planckPerHertz * nu) / t),
+  planckLambdaSlope: (l = Number.NaN, t = Number.NaN) =>
+    -5 - thermalSlope(planckPerMetre / (l * t)),
+  planckLambdaWarmth: (l = Number.NaN, t = Number.NaN) => -thermalSlope(planckPerMetre / (l * t)),
+  hubbleLength: (z = Number.NaN) => 299792458 / hubble(z),
+  hubbleSlope: (z = Number.NaN) => hubbleSlope(z),
+};
+
 function round(x: number): number {
   return x < 0 ? -Math.round(-x) : Math.round(x);
 }
@@ -101,6 +141,7 @@ export const kernels: Readonly<Record<string, Kernel>> = Object.freeze({
   lookback_time: lookbackTime,
   comoving_distance: comovingDistance,
   hubble,
+  ...slopeKernels,
 } as Record<string, Kernel>);
 
 /** Functions whose infinite result means that it is too large, not that it is undefined. */

@@ -44,6 +44,12 @@ export function hubble(z: number): number {
   return z > -1 ? hubbleNow * expansion(z) : Number.NaN;
 }
 
+/** dH/dz in s⁻¹: (3/2) H₀ Ω_m (1 + z)² / E(z). */
+export function hubbleSlope(z: number): number {
+  const growth = 1.5 * defaultCosmology.omegaMatter * (1 + z) ** 2;
+  return z > -1 ? (hubbleNow * growth) / expansion(z) : Number.NaN;
+}
+
 /** Line-of-sight comoving distance in m: c ∫ dz / H. Integrated in ln(1 + z), where it is smooth. */
 export function comovingDistance(z: number): number {
   if (!(z > -1)) return Number.NaN;

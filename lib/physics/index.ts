@@ -11,6 +11,7 @@ export {
   comovingDistance,
   defaultCosmology,
   hubble,
+  hubbleSlope,
   lookbackTime,
   luminosityDistance,
 } from "./cosmology";
