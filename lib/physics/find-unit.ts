@@ -56,33 +56,47 @@ function rowsOf(em: EmConvention): readonly UnitRow[] {
   return unitRows.filter((row) => row.convention === undefined || row.convention === em);
 }
 
-function prefixableNames(row: UnitRow): readonly string[] {
-  return [row.symbol, ...row.aliases, ...(row.prefixedAliases ?? [])];
+/** A row, and the prefix that stands before its name. */
+interface Entry {
+  readonly row: UnitRow;
+  readonly prefix: string;
 }
 
-/** Exact rows come first, so that `min` is a minute, `cd` a candela and `mas` an angle. */
-function search(typed: string, system: UnitSystem): Unit | undefined {
-  const name = typed.length > 1 ? typed.replace(/^[µμ]/u, "u") : typed;
-  const rows = rowsOf(system.em);
-  const exact = rows.find((row) => row.symbol === name || row.aliases.includes(name));
-  if (exact) return toUnit(exact, "", system);
+/** Whole names come first, so that `min` is a minute, `cd` a candela and `mas` an angle. */
+function readIndex(em: EmConvention): Map<string, Entry> {
+  const index = new Map<string, Entry>();
+  const add = (name: string, entry: Entry) => index.has(name) || index.set(name, entry);
+  const rows = rowsOf(em);
   for (const row of rows) {
-    const names = prefixableNames(row);
-    const prefix = row.prefixes.find((one) => names.some((rest) => one + rest === name));
-    if (prefix !== undefined) return toUnit(row, prefix, system);
+    for (const name of [row.symbol, ...row.aliases]) add(name, { row, prefix: "" });
   }
-  return undefined;
+  for (const row of rows) {
+    const names = [row.symbol, ...row.aliases, ...(row.prefixedAliases ?? [])];
+    for (const prefix of row.prefixes) {
+      for (const name of names) add(prefix + name, { row, prefix });
+    }
+  }
+  return index;
 }
 
-const found = new Map<string, Unit | undefined>();
-const mostFound = 5_000;
+const indices = new Map<EmConvention, Map<string, Entry>>();
+
+function indexOf(em: EmConvention): Map<string, Entry> {
+  const index = indices.get(em) ?? readIndex(em);
+  indices.set(em, index);
+  return index;
+}
+
+/** Units as found so far; there are no more than names in the indices. */
+const found = new Map<string, Unit>();
 
 /** One unit by its exact symbol, prefix included; undefined where it is none under the convention. */
 export function findUnit(name: string, system: UnitSystem): Unit | undefined {
-  const key = `${system.edition} ${system.em} ${name}`;
-  if (found.has(key)) return found.get(key);
-  if (found.size >= mostFound) found.clear();
-  const unit = search(name, system);
+  const plain = name.length > 1 ? name.replace(/^[µμ]/u, "u") : name;
+  const entry = indexOf(system.em).get(plain);
+  if (!entry) return undefined;
+  const key = `${system.edition} ${system.em} ${plain}`;
+  const unit = found.get(key) ?? toUnit(entry.row, entry.prefix, system);
   found.set(key, unit);
   return unit;
 }
