@@ -8,7 +8,7 @@ function contentPolicy(nonce: string, development: boolean): string {
     // Typeset mathematics carries its layout in style attributes.
     "style-src 'self' 'unsafe-inline'",
     "img-src 'self' data: blob:",
-    "font-src 'self' data:",
+    "font-src 'self'",
     `connect-src 'self'${development ? " ws:" : ""}`,
     "object-src 'none'",
     "base-uri 'none'",
