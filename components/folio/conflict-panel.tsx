@@ -21,7 +21,9 @@ function sidesOf(conflict: Conflict): { name: string; mine: string; theirs: stri
   if ("field" in conflict) {
     return { name: conflict.field, mine: conflict.mine ?? "", theirs: conflict.theirs ?? "" };
   }
-  return { name: "a cell", mine: cellText(conflict.mine), theirs: cellText(conflict.theirs) };
+  const cell = conflict.mine ?? conflict.theirs ?? conflict.base;
+  const name = cell && "symbol" in cell ? `${cell.kind} ${cell.symbol}` : (cell?.kind ?? "a cell");
+  return { name, mine: cellText(conflict.mine), theirs: cellText(conflict.theirs) };
 }
 
 /** What two people changed at once: both texts side by side, and the question which stays. */
@@ -32,7 +34,7 @@ export function ConflictPanel() {
     dispatch({ type: "settled", conflict, file: settle(state.file, conflict, side) });
   return (
     <section
-      className="border-y-2 border-sodium py-3 font-sans"
+      className="mt-4 border-y-2 border-sodium py-3 font-sans"
       aria-label="Changes that meet"
       role="alert"
     >

@@ -39,7 +39,10 @@ function useDrop(id: string, acts: CellActs) {
       event.preventDefault();
       setOver(true);
     },
-    onDragLeave: () => setOver(false),
+    onDragLeave: (event: DragEvent) => {
+      // Leaving for something within the cell is not leaving it.
+      if (!event.currentTarget.contains(event.relatedTarget as Node | null)) setOver(false);
+    },
     onDrop: (event: DragEvent) => {
       setOver(false);
       const moved = event.dataTransfer.getData(dragType);

@@ -37,15 +37,18 @@ export function FolioHead({ file, edit }: HeadProps) {
   return (
     <header className="folio-head">
       <h1 className="sr-only">{file.title || "Untitled calculation"}</h1>
-      <input
+      {/* A field that grows, since a title may be longer than a line. */}
+      <textarea
+        rows={1}
         aria-label="Title"
         className="folio-title"
         maxLength={limits.titleLength}
         placeholder="Title"
         value={file.title}
         onFocus={visit.begin}
+        onKeyDown={(event) => event.key === "Enter" && event.preventDefault()}
         onChange={(event) =>
-          edit({ ...file, title: event.target.value.replace(/\p{Cc}/gu, " ") }, visit.isLater())
+          edit({ ...file, title: event.target.value.replace(/\p{Cc}+/gu, " ") }, visit.isLater())
         }
       />
       <Abstract file={file} edit={edit} />

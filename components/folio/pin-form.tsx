@@ -72,7 +72,7 @@ export function PinForm({ file, answer, visibility, onPin }: PinFormProps) {
               checked={accepts}
               onChange={(event) => setAccepts(event.target.checked)}
             />
-            Pin in spite of {count}; readers will see them.
+            Pin in spite of {count}; readers will see {faults.length === 1 ? "it" : "them"}.
           </label>
         </div>
       )}

@@ -12,7 +12,10 @@ export function MarginVersions({ id, versions }: { id: string; versions: Draft["
       <ol>
         {[...versions].reverse().map((version) => (
           <li key={version.number} className="py-0.5">
-            <Link href={`/c/${id}/v/${version.number}`}>v{version.number}</Link> {version.summary}{" "}
+            <Link className="link" href={`/c/${id}/v/${version.number}`}>
+              v{version.number}
+            </Link>{" "}
+            {version.summary}{" "}
             <span className="text-faint">
               <Time iso={version.pinnedAt} withTime={false} />
             </span>{" "}

@@ -19,6 +19,16 @@ export interface CellProps<C extends Cell = Cell> {
   readonly shown: CellPresentation | undefined;
 }
 
+/** What the author wrote beside a cell. */
+function Note({ markdown }: { markdown: string | undefined }) {
+  if (!markdown) return null;
+  return (
+    <div className="font-serif text-sm text-faint">
+      <Prose markdown={markdown} />
+    </div>
+  );
+}
+
 /** Where a formula cannot be typeset yet, its line is shown as typed. */
 function Typed({ line }: { line: string }) {
   return <code className="font-mono text-sm">{line}</code>;
@@ -42,7 +52,7 @@ function GivenBody({ cell, result, shown }: CellProps<GivenCell>) {
           <Typed line={shown?.line ?? cell.symbol} />
         )}
       </p>
-      {cell.note && <p className="font-serif text-sm text-faint">{cell.note}</p>}
+      <Note markdown={cell.note} />
       {cell.source && (
         <p className="font-sans text-xs text-faint">
           <span className="sr-only">source: </span>[{cell.source}]
@@ -82,7 +92,9 @@ function RelationBody({ cell, result, shown }: CellProps<RelationCell>) {
           a function of {result.parameters.join(", ")}
         </p>
       )}
-      {cell.note && <p className="text-center font-serif text-sm text-faint">{cell.note}</p>}
+      <div className="text-center">
+        <Note markdown={cell.note} />
+      </div>
     </div>
   );
 }
@@ -111,7 +123,7 @@ function CheckBody({ cell, result, shown }: CellProps<CheckCell>) {
           </>
         )}
       </div>
-      {cell.because && <p className="font-serif text-sm text-faint">{cell.because}</p>}
+      <Note markdown={cell.because} />
     </div>
   );
 }

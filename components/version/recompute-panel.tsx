@@ -31,12 +31,12 @@ export function RecomputePanel({
   return (
     <div className="font-sans text-sm print:hidden">
       <div className="flex flex-wrap items-end gap-3">
-        <label className="block">
+        <label className="block max-w-full">
           <span className="block font-medium">constants</span>
           <select
             value={chosen}
             onChange={(event) => choose(event.target.value as Edition)}
-            className="mt-1 min-h-9 border border-ink bg-ground px-2 py-1 text-ink"
+            className="mt-1 min-h-9 max-w-full border border-ink bg-ground px-2 py-1 text-ink"
           >
             {Object.entries(editionTitles).map(([name, title]) => (
               <option key={name} value={name}>

@@ -20,7 +20,7 @@ export function VersionActions({
   mayWithdraw: boolean;
 }) {
   return (
-    <section className="mt-8 print:hidden">
+    <section id="check" className="mt-8 print:hidden">
       <h2 className="mb-2 font-serif text-xl font-semibold">Check and use</h2>
       <RecomputePanel id={id} number={number} edition={edition} />
       <noscript>
@@ -29,7 +29,7 @@ export function VersionActions({
           <code className="font-mono">recompute</code>, is checked without them.
         </p>
       </noscript>
-      <p className="mt-4 flex flex-wrap items-baseline gap-x-5 gap-y-2 font-sans text-sm">
+      <div className="mt-4 flex flex-wrap items-baseline gap-x-5 gap-y-2 font-sans text-sm">
         <a className="link" href={`/api/calculations/${id}/versions/${number}?download=1`}>
           download version file
         </a>
@@ -40,7 +40,7 @@ export function VersionActions({
           </a>
         )}
         {mayWithdraw && <WithdrawButton id={id} number={number} />}
-      </p>
+      </div>
     </section>
   );
 }

@@ -1,5 +1,6 @@
 import { Prose } from "@/components/typeset/prose";
 import type { EvaluateAnswer, Role, VersionFile } from "@/lib/schema";
+import { Byline } from "./byline";
 import { Provenance } from "./provenance";
 import { versionCells } from "./read-version";
 import { Standing } from "./standing";
@@ -29,17 +30,7 @@ export function VersionPage(props: VersionPageProps) {
         <h1 className="break-words font-serif text-3xl font-semibold">
           {file.title || "Untitled calculation"}
         </h1>
-        <p className="mt-1 font-sans text-sm text-faint">
-          v{number}
-          {latest > number && (
-            <>
-              {" · "}
-              <a className="link" href={`/c/${id}/v/${latest}`}>
-                v{latest} is the latest
-              </a>
-            </>
-          )}
-        </p>
+        <Byline file={file} latest={latest} />
         {file.abstract && (
           <section aria-label="Abstract" className="mt-4">
             <Prose markdown={file.abstract} />
@@ -55,7 +46,9 @@ export function VersionPage(props: VersionPageProps) {
         </ol>
       </section>
       <section className="mt-10">
-        <h2 className="mb-2 font-serif text-xl font-semibold">Provenance</h2>
+        <h2 id="provenance" className="mb-2 font-serif text-xl font-semibold">
+          Provenance
+        </h2>
         <Provenance file={file} url={url} />
       </section>
       <VersionActions
