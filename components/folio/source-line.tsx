@@ -127,6 +127,8 @@ function startState(
       }),
       autocompletion({
         icons: false,
+        // Enter finishes the line as it was typed; a name of the list is taken once it was chosen.
+        selectOnOpen: false,
         override: [
           (context) => {
             const word = context.matchBefore(/[\p{L}][\p{L}\p{N}_]*/u);
