@@ -28,6 +28,11 @@ async function order(page: Page): Promise<string[]> {
   return names.map((name) => name.replace(/^cell \d+, /, ""));
 }
 
+/** The list of names and units that go with what is typed. */
+function completions(page: Page): Locator {
+  return page.getByRole("listbox");
+}
+
 test("I write a given, a relation and a check, and pin them, without a mouse", async ({
   page,
   context,
@@ -105,6 +110,9 @@ test("I open a source line, change it, write below it and close it, without a mo
   await expect(page.getByLabel("source of this given")).toBeFocused();
   await page.keyboard.press("Control+a");
   await page.keyboard.type("M = 20 Msun");
+  await expect(completions(page)).toBeVisible();
+  await page.keyboard.press("Escape");
+  await expect(completions(page)).toBeHidden();
   await page.keyboard.press("Escape");
   await expect(cell(page, "given M")).toBeFocused();
   await expectValue(cell(page, "relation (1) L_Edd"), "2.51×1039ergs−1");
@@ -119,6 +127,38 @@ test("I open a source line, change it, write below it and close it, without a mo
   await page.keyboard.press("ArrowUp");
   await page.keyboard.press("l");
   await expect(lastLine(page)).toBeFocused();
+});
+
+test("Enter takes a name of the list only after I chose it with an arrow", async ({
+  page,
+  context,
+}) => {
+  await signUp(context);
+  const id = await start(page.request, fileOf("A limit", limitingLuminosity.slice(1)));
+  const openCheck = async (line: string) => {
+    await page.keyboard.press("Enter");
+    await expect(page.getByLabel("source of this check")).toBeFocused();
+    await page.keyboard.press("Control+a");
+    await page.keyboard.type(line);
+    await expect(completions(page)).toBeVisible();
+  };
+  const condition = async () => {
+    const { file } = await draftOf(page.request, id);
+    return file.cells.find((one) => one.id === "bright");
+  };
+  await page.goto(`/c/${id}`);
+  await tabTo(page, cell(page, "check"));
+  await openCheck("3 < L_Ed");
+  await page.keyboard.press("Enter");
+  await expect(cell(page, "check")).toBeFocused();
+  await expect.poll(condition).toMatchObject({ condition: "3 < L_Ed" });
+
+  await openCheck("1e38 erg/s < L_Ed");
+  await page.keyboard.press("ArrowDown");
+  await page.keyboard.press("Enter");
+  await page.keyboard.press("Enter");
+  await expect(cell(page, "check")).toBeFocused();
+  await expect.poll(condition).toMatchObject({ condition: "1e38 erg/s < L_Edd" });
 });
 
 test("The question mark shows the keys, and Escape leads back to the cell in hand", async ({
