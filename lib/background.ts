@@ -1,11 +1,11 @@
 import "server-only";
 import { db } from "@/db";
-import { migrate } from "@/db/migrate";
+import { DamagedDatabaseError, migrate } from "@/db/migrate";
 import { sessionAdapter } from "@/lib/auth/adapter";
 import { startEvaluators } from "@/lib/evaluator";
 import { forgetAnswersBefore, forgetUnfinished, notePeerAddresses } from "@/lib/http";
 import { deliverDueMail } from "@/lib/mail";
-import { settings } from "@/lib/settings";
+import { SettingsError, settings } from "@/lib/settings";
 
 const mailEveryMs = 2_000;
 const sweepEveryMs = 3600 * 1000;
@@ -34,10 +34,7 @@ async function sweep(): Promise<void> {
   await forgetAnswersBefore(new Date(now - idempotencyMs));
 }
 
-/** Bring the database to its newest shape, warm the evaluators, send mail and sweep out. */
-export async function startBackground(): Promise<void> {
-  if (kept.leadingOrderBackground) return;
-  kept.leadingOrderBackground = true;
+async function start(): Promise<void> {
   const { mailUrl, localMail } = settings();
   if (mailUrl === undefined && !localMail) {
     console.warn("MAIL_URL is not set: mail waits in the outbox and is not sent.");
@@ -48,4 +45,22 @@ export async function startBackground(): Promise<void> {
   await startEvaluators();
   repeat(mailEveryMs, deliverDueMail);
   repeat(sweepEveryMs, sweep);
+}
+
+/** End a server that cannot start; without a stack where the reader can put it right. */
+function giveUp(error: unknown): never {
+  if (error instanceof DamagedDatabaseError) {
+    console.error(`${settings().databaseFile}: ${error.message}`);
+  } else console.error(error instanceof SettingsError ? error.message : error);
+  process.exit(1);
+}
+
+/**
+ * Bring the database to its newest shape, warm the evaluators, send mail and sweep out. Ends the
+ * process where that fails: a server that answers nothing but errors helps nobody.
+ */
+export async function startBackground(): Promise<void> {
+  if (kept.leadingOrderBackground) return;
+  kept.leadingOrderBackground = true;
+  await start().catch(giveUp);
 }

@@ -48,20 +48,25 @@ function contradictions(s: z.infer<typeof schema>): string[] {
   return [];
 }
 
-function wrong(lines: readonly string[]): Error {
-  return new Error(`The settings are not right.\n${lines.join("\n")}`);
+/** Settings that the server cannot start with, one line for each. */
+export class SettingsError extends Error {
+  constructor(lines: readonly string[]) {
+    super(`The settings are not right.\n${lines.join("\n")}`);
+  }
 }
 
-/** Read the settings. Throws with one line for each that is wrong. */
+/** Read the settings. Throws a SettingsError where some are wrong. */
 export function readSettings(environment: NodeJS.ProcessEnv): Settings {
   const given = Object.fromEntries(Object.entries(environment).filter(([, value]) => value !== ""));
   const parsed = schema.safeParse(given);
   if (!parsed.success) {
-    throw wrong(parsed.error.issues.map((issue) => `${issue.path.join(".")}: ${issue.message}`));
+    throw new SettingsError(
+      parsed.error.issues.map((issue) => `${issue.path.join(".")}: ${issue.message}`),
+    );
   }
   const s = parsed.data;
   const against = contradictions(s);
-  if (against.length > 0) throw wrong(against);
+  if (against.length > 0) throw new SettingsError(against);
   const production = s.NODE_ENV === "production";
   return {
     production,
