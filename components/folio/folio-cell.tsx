@@ -3,13 +3,14 @@
 import { type DragEvent, memo, useState } from "react";
 import { CellBody, kindNames } from "@/components/typeset/cell-body";
 import { CellFaults } from "@/components/typeset/cell-faults";
+import { KeptCell } from "@/components/typeset/kept-cell";
 import { cellLine } from "@/lib/expr/entry";
+import type { UnitSystem } from "@/lib/physics";
 import type { Cell, CellPresentation, CellResult } from "@/lib/schema";
 import { CellDetails } from "./cell-details";
 import { onCellKey } from "./cell-keys";
 import { CellTools } from "./cell-tools";
 import { applySuggestion, diagnosticsOf } from "./diagnostics";
-import { KeptCell } from "./kept-cell";
 import { SourceEditor } from "./source-editor";
 import type { CellActs } from "./use-cell-acts";
 
@@ -24,6 +25,7 @@ interface FolioCellProps {
   readonly waits: boolean;
   /** A typed line that the cell cannot hold yet. */
   readonly pending: string | undefined;
+  readonly system: UnitSystem;
   readonly acts: CellActs;
 }
 
@@ -70,7 +72,7 @@ function nameOf(cell: Cell, index: number, shown: CellPresentation | undefined):
 }
 
 /** The cell as it is read; a click on it opens its source. */
-function ReadCell({ cell, result, shown, isOpen, acts }: FolioCellProps) {
+function ReadCell({ cell, result, shown, isOpen, system, acts }: FolioCellProps) {
   const isKept = cell.kind === "sweep" || cell.kind === "solve";
   return (
     // biome-ignore lint/a11y/useKeyWithClickEvents: Enter on the cell around it does the same.
@@ -83,7 +85,11 @@ function ReadCell({ cell, result, shown, isOpen, acts }: FolioCellProps) {
         if (!onLink && !isSelecting && !isOpen) acts.open(cell.id);
       }}
     >
-      {isKept ? <KeptCell cell={cell} /> : <CellBody cell={cell} result={result} shown={shown} />}
+      {isKept ? (
+        <KeptCell cell={cell} result={result} system={system} />
+      ) : (
+        <CellBody cell={cell} result={result} shown={shown} />
+      )}
     </div>
   );
 }
@@ -122,7 +128,7 @@ function FolioCellView(props: FolioCellProps) {
         <ReadCell {...props} />
         {pending !== undefined && !isOpen && <PendingLine line={pending} kind={cell.kind} />}
         {isOpen && !isKept && <SourceEditor key={id} cell={cell} />}
-        {!isKept && <CellFaults result={result} onAccept={accept} />}
+        <CellFaults result={result} onAccept={isKept ? undefined : accept} />
         {isOpen && !isKept && <CellDetails cell={cell} />}
         {inHand && <CellTools id={id} isOpen={isOpen} acts={acts} />}
       </div>

@@ -23,6 +23,9 @@ export function FolioCells({ evaluated, acts }: { evaluated: CalculationFile; ac
   const column = useRef<HTMLDivElement>(null);
   const shown = answer.presentation?.cells ?? nothingShown;
   const waiting = useMemo(() => waitingCells(file, evaluated, shown), [file, evaluated, shown]);
+  const { edition, em = "si" } = file;
+  // The same object while it says the same, so that cells are not redrawn.
+  const system = useMemo(() => ({ edition, em }), [edition, em]);
   const inHand = current === null ? undefined : shown[current];
 
   const write = (line: string, below: string | null) => {
@@ -63,6 +66,7 @@ export function FolioCells({ evaluated, acts }: { evaluated: CalculationFile; ac
             isOpen={open === cell.id}
             waits={waiting.has(cell.id)}
             pending={pending[cell.id]}
+            system={system}
             acts={acts}
           />
           {(writingBelow === cell.id || pending[newLineKey(cell.id)] !== undefined) &&

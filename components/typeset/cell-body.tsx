@@ -70,7 +70,8 @@ function RelationBody({ cell, result, shown }: CellProps<RelationCell>) {
     <div>
       <div className="equation">
         <div className="equation-body">
-          {shown?.tex ? (
+          {/* What could not be parsed has no right-hand side to set. */}
+          {shown?.tex?.includes("=") ? (
             <Tex tex={shown.tex} display />
           ) : (
             <Typed line={shown?.line ?? cell.formula} />

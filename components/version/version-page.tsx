@@ -23,6 +23,7 @@ export interface VersionPageProps {
 export function VersionPage(props: VersionPageProps) {
   const { file, withdrawn, role, latest, url, presentation } = props;
   const { calculation: id, number } = file.version;
+  const system = { edition: file.edition, em: file.em ?? "si" };
   return (
     <main id="main" className="mx-auto w-full max-w-folio px-4 py-8">
       {withdrawn && <WithdrawnNotice number={number} {...withdrawn} />}
@@ -41,7 +42,7 @@ export function VersionPage(props: VersionPageProps) {
       <section aria-label="The calculation">
         <ol className="m-0 list-none p-0">
           {versionCells(file, presentation).map((one) => (
-            <VersionCell key={one.cell.id} {...one} />
+            <VersionCell key={one.cell.id} {...one} system={system} />
           ))}
         </ol>
       </section>
