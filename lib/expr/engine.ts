@@ -1,13 +1,16 @@
+import Fraction from "fraction.js";
 import { findConstant, type UnitSystem } from "../physics";
-import type { CalculationFile } from "../schema/calculation";
+import type { CalculationFile, GivenCell } from "../schema/calculation";
 import type { Presentation } from "../schema/presentation";
 import { type CellResult, type Notice, type Results, resultsFormat } from "../schema/results";
 import { attempt, type Fault } from "./faults";
 import type { Formula } from "./formula";
 import { FormulaCache } from "./formula-cache";
 import { failure, kindOf, type Outcome } from "./kinds";
+import { standardUncertainty } from "./kinds/given";
 import { noticesOf } from "./notices";
 import { present } from "./present";
+import type { Gradient, Powers } from "./propagate";
 import { refusedFunctions } from "./refused-functions";
 import { engineRelease } from "./release";
 import { type Resolved, type ResolvedCell, resolve, structureKey, withCellsOf } from "./resolve";
@@ -32,6 +35,8 @@ interface Run {
   readonly runtime: Runtime;
   /** Formulas of relations, by the symbol they define. */
   readonly formulas: ReadonlyMap<string, Formula>;
+  /** Givens, by the symbol they define. */
+  readonly givens: ReadonlyMap<string, GivenCell>;
   /** Outcomes so far, by cell id. */
   readonly outcomes: Map<string, Kept>;
 }
@@ -91,7 +96,8 @@ class RememberingEngine implements Engine {
     const outcomes = new Map<string, Kept>();
     const scope = makeScope(system, (name) => meaningOf(name, resolved, outcomes));
     const formulas = formulasBySymbol(resolved);
-    return { system, resolved, scope, runtime: new Runtime(), formulas, outcomes };
+    const givens = givensBySymbol(resolved);
+    return { system, resolved, scope, runtime: new Runtime(), formulas, givens, outcomes };
   }
 
   #outcome(one: ResolvedCell, run: Run): Kept {
@@ -142,6 +148,10 @@ class RememberingEngine implements Engine {
       formulas: this.#formulas,
       runtime: run.runtime,
       value: (key: InputKey) => inputValue(key, run),
+      gradientOf: (key: InputKey) => outcomeOf(key, run)?.gradient ?? itself(key),
+      powersOf: (key: InputKey) => outcomeOf(key, run)?.powers ?? toTheFirst(key),
+      uncertaintyOf: (root: InputKey) => rootUncertainty(root, run),
+      givenOf: (root: InputKey) => givenOf(root, run),
       formulaOf: (symbol: string) => run.formulas.get(symbol),
     };
     const outcome = attempt(() => kindOf(cell).evaluate(cell, reading, context));
@@ -159,6 +169,14 @@ function formulasBySymbol(resolved: Resolved): Map<string, Formula> {
       formulas.set(declaration.symbol, formula);
   }
   return formulas;
+}
+
+function givensBySymbol(resolved: Resolved): Map<string, GivenCell> {
+  const givens = new Map<string, GivenCell>();
+  for (const { cell, declaration } of resolved.order) {
+    if (declaration && cell.kind === "given") givens.set(declaration.symbol, cell);
+  }
+  return givens;
 }
 
 function meaningOf(
@@ -179,6 +197,32 @@ function inputValue(key: InputKey, run: Run): number {
     : findConstant(name, run.system)?.siValue;
   if (value === undefined) throw new Error(`no value for ${key}`);
   return value;
+}
+
+/** The outcome of the cell that defines an input; undefined for a constant. */
+function outcomeOf(key: InputKey, run: Run): Kept | undefined {
+  if (!key.startsWith("symbol:")) return undefined;
+  const id = run.resolved.definers.get(key.slice("symbol:".length));
+  return id === undefined ? undefined : run.outcomes.get(id);
+}
+
+/** A constant rests on itself. */
+function itself(key: InputKey): Gradient {
+  return new Map([[key, 1]]);
+}
+
+function toTheFirst(key: InputKey): Powers {
+  return new Map([[key, new Fraction(1)]]);
+}
+
+function givenOf(root: InputKey, run: Run): GivenCell | undefined {
+  return root.startsWith("symbol:") ? run.givens.get(root.slice("symbol:".length)) : undefined;
+}
+
+function rootUncertainty(root: InputKey, run: Run): number {
+  const given = givenOf(root, run);
+  if (given) return standardUncertainty(given) ?? 0;
+  return findConstant(root.slice("constant:".length), run.system)?.siUncertainty ?? 0;
 }
 
 /** An unknown name may be a refused function, or a slip that can be mended. */

@@ -1,8 +1,9 @@
-import { type CompiledFormula, compile } from "./compile";
+import { type CompiledFormula, type CompiledGradient, compile, compileGradient } from "./compile";
 import { attempt, type Fault, raise } from "./faults";
 import { type Formula, type FormulaWords, inTyped, readFormula, readWords } from "./formula";
 import { infer, inferCondition } from "./infer";
 import type { Roles } from "./parse";
+import { type Exponents, powerLaw } from "./power-law";
 import type { Meaning, Scope } from "./scope";
 import type { Typed } from "./typed";
 
@@ -11,8 +12,22 @@ type Kept<T> = { ok: true; value: T } | { ok: false; fault: Fault };
 /** A formula with its dimensions settled and its kernel made when first asked for. */
 export class SettledFormula {
   #kernel: CompiledFormula | undefined;
+  #gradient: CompiledGradient | undefined;
+  #powerLaw: Exponents | undefined;
   readonly #parts = new Map<Typed, CompiledFormula>();
   constructor(readonly typed: Typed) {}
+
+  /** The kernel with slopes in the inputs of `kernel`. */
+  get gradient(): CompiledGradient {
+    this.#gradient ??= compileGradient(this.typed, this.kernel.inputs);
+    return this.#gradient;
+  }
+
+  /** Exact exponents in the inputs, read off the form. */
+  get powerLaw(): Exponents {
+    this.#powerLaw ??= powerLaw(this.typed);
+    return this.#powerLaw;
+  }
 
   get kernel(): CompiledFormula {
     this.#kernel ??= compile(this.typed);

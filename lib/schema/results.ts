@@ -76,6 +76,24 @@ export const givenResultSchema = z.object({
   ...notices,
 });
 
+/** Which input the uncertainty comes from, as its share of the variance. */
+export const shareSchema = z.object({ symbol: z.string(), share: z.number() });
+
+/** The local exponent in one given; exact where it is a true power law. */
+export const scalingSchema = z.object({
+  symbol: z.string(),
+  exponent: z.number(),
+  exact: z.boolean(),
+});
+
+/** Prefactor at the fiducials times powers of (input / fiducial). */
+export const normalisedSchema = z.object({
+  prefactor: z.number(),
+  terms: z.array(
+    z.object({ symbol: z.string(), fiducial: z.number(), unit: z.string(), exponent: z.number() }),
+  ),
+});
+
 export const relationResultSchema = z.object({
   kind: z.literal("relation"),
   status: z.literal("ok"),
@@ -83,6 +101,11 @@ export const relationResultSchema = z.object({
   value: z.number(),
   unit: z.string(),
   si: siSchema,
+  /** One standard deviation in `unit`, to first order; null when every input is exact. */
+  uncertainty: z.number().nullable().optional(),
+  budget: z.array(shareSchema).optional(),
+  scaling: z.array(scalingSchema).optional(),
+  normalised: normalisedSchema.optional(),
   ...notices,
 });
 
@@ -155,6 +178,9 @@ export type ErrorCode = z.infer<typeof errorCodeSchema>;
 export type CellError = z.infer<typeof cellErrorSchema>;
 export type Notice = z.infer<typeof noticeSchema>;
 export type FailedResult = z.infer<typeof failed>;
+export type Share = z.infer<typeof shareSchema>;
+export type Scaling = z.infer<typeof scalingSchema>;
+export type Normalised = z.infer<typeof normalisedSchema>;
 export type GivenResult = z.infer<typeof givenResultSchema>;
 export type RelationResult = z.infer<typeof relationResultSchema>;
 export type FunctionResult = z.infer<typeof functionResultSchema>;

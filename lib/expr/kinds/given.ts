@@ -1,7 +1,9 @@
+import Fraction from "fraction.js";
 import { dimensionless, dimensionToJson } from "../../physics";
 import type { GivenCell } from "../../schema/calculation";
-import { requireSymbol, requireUnit } from "../cell-faults";
+import { type GoodUnit, requireSymbol, requireUnit } from "../cell-faults";
 import { raise } from "../faults";
+import type { InputKey } from "../typed";
 import type { KindOfCell } from "./kind";
 
 /** True where a given states an uncertainty, in whatever form. */
@@ -41,6 +43,19 @@ export function inSi(value: number, factor: number): number {
   return si;
 }
 
+/** A given rests on itself, in its own unit, and through a body mass in its unit on G. */
+function restsOn(symbol: string, si: number, unit: GoodUnit, gravity: number) {
+  const gradient = new Map<InputKey, number>([[`symbol:${symbol}`, unit.factor]]);
+  const powers = new Map<InputKey, Fraction>([[`symbol:${symbol}`, new Fraction(1)]]);
+  const masses = unit.nominalMassExponents ?? [];
+  const inG = masses.reduce((sum, { exponent }) => sum.sub(exponent), new Fraction(0));
+  if (!inG.equals(0)) {
+    gradient.set("constant:G", (si * inG.valueOf()) / gravity);
+    powers.set("constant:G", inG);
+  }
+  return { gradient, powers };
+}
+
 /** An input or assumption: symbol, value, uncertainty, unit. */
 export const givenKind: KindOfCell<GivenCell> = {
   kind: "given",
@@ -56,13 +71,15 @@ export const givenKind: KindOfCell<GivenCell> = {
     const unit = requireUnit(cell.unit ?? "", context.system, "unit");
     const si = inSi(cell.value, unit.factor);
     const exact = unit.dimension === dimensionless && !isUncertain(cell);
+    const symbol = requireSymbol(cell.symbol);
     return {
       si,
+      ...restsOn(symbol, si, unit, context.value("constant:G")),
       meaning: { kind: "quantity", dimension: unit.dimension, ...(exact ? { exact: si } : {}) },
       result: {
         kind: "given",
         status: "ok",
-        symbol: requireSymbol(cell.symbol),
+        symbol,
         value: cell.value,
         unit: cell.unit ?? "",
         si: { value: si, dimension: dimensionToJson(unit.dimension) },

@@ -1,9 +1,10 @@
 import type { UnitSystem } from "../../physics";
-import type { Cell, CellKind } from "../../schema/calculation";
+import type { Cell, CellKind, GivenCell } from "../../schema/calculation";
 import type { CellError, CellResult, Notice } from "../../schema/results";
 import type { Formula } from "../formula";
 import type { FormulaCache } from "../formula-cache";
 import type { Roles } from "../parse";
+import type { Gradient, Powers } from "../propagate";
 import type { Runtime } from "../runtime";
 import type { Meaning, Scope } from "../scope";
 import type { InputKey } from "../typed";
@@ -29,6 +30,13 @@ export interface EvaluationContext {
   readonly runtime: Runtime;
   /** The value of an input in SI. */
   value(key: InputKey): number;
+  /** What an input rests on: derivatives and exact exponents in givens and constants. */
+  gradientOf(key: InputKey): Gradient;
+  powersOf(key: InputKey): Powers;
+  /** Standard uncertainty of a given in its own unit, of a constant in SI; 0 when exact. */
+  uncertaintyOf(root: InputKey): number;
+  /** The cell of a root that is a given. */
+  givenOf(root: InputKey): GivenCell | undefined;
   /** The formula of the relation that defines a symbol; undefined for a given. */
   formulaOf(symbol: string): Formula | undefined;
 }
@@ -40,6 +48,9 @@ export interface Outcome {
   readonly meaning?: Meaning;
   /** Its value in SI, for cells that depend on it. */
   readonly si?: number;
+  /** What that value rests on. */
+  readonly gradient?: Gradient;
+  readonly powers?: Powers;
 }
 
 /**

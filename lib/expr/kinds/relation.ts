@@ -1,10 +1,22 @@
 import { type Dimension, dimensionToJson, readableUnit, type UnitSystem } from "../../physics";
 import type { RelationCell } from "../../schema/calculation";
+import type { Share } from "../../schema/results";
 import { type GoodUnit, requireSymbol, requireUnit } from "../cell-faults";
 import { attempt, type Fault, raise } from "../faults";
 import { type Formula, type FormulaHead, type FormulaWords, readHead } from "../formula";
+import type { SettledFormula } from "../formula-cache";
 import { functionNames } from "../functions";
 import { normalise, typedRange } from "../normalise";
+import {
+  type Contribution,
+  chainPowers,
+  chainRule,
+  combinedUncertainty,
+  contributions,
+  type Gradient,
+  type Powers,
+} from "../propagate";
+import { normalisedForm, scalingOf } from "../scale";
 import { readTokens } from "../tokens";
 import type { EvaluationContext, KindOfCell, Outcome } from "./kind";
 
@@ -115,6 +127,53 @@ function unknownIn(formula: Formula, name: string): Fault {
   return { code: "unknown-name", reason: "unknown-name", ...place, with: { name } };
 }
 
+interface Valued {
+  readonly si: number;
+  readonly gradient: Gradient;
+  readonly powers: Powers;
+}
+
+/** The value, and what it rests on through its inputs. */
+function evaluateWithSlopes(settled: SettledFormula, context: EvaluationContext): Valued {
+  const { inputs, run } = settled.gradient;
+  const slopes = new Float64Array(inputs.length);
+  const si = run(
+    inputs.map((key) => context.value(key)),
+    slopes,
+    context.runtime,
+  );
+  const gradient = chainRule(inputs, slopes, context.gradientOf);
+  return { si, gradient, powers: chainPowers(settled.powerLaw, context.powersOf) };
+}
+
+/** Shares of a variance smaller than this are left out of the budget. */
+const smallestShare = 1e-6;
+
+function shareOf(part: Contribution, variance: number): Share {
+  const symbol = part.root.slice(part.root.indexOf(":") + 1);
+  return { symbol, share: part.amount ** 2 / variance };
+}
+
+/** Uncertainty and budget, exponents and normalised form, as far as they are defined. */
+function assessment(value: number, factor: number, valued: Valued, context: EvaluationContext) {
+  const { si, gradient, powers } = valued;
+  const parts = contributions(gradient, context.uncertaintyOf);
+  const uncertainty = combinedUncertainty(parts) / factor;
+  const variance = parts.reduce((sum, part) => sum + part.amount ** 2, 0);
+  // An infinite slope (a root at zero) leaves the first order without meaning.
+  const isDefined = Number.isFinite(uncertainty) && variance > 0;
+  const budget = parts
+    .map((part) => shareOf(part, variance))
+    .filter(({ share }) => share >= smallestShare);
+  const normalised = normalisedForm(value, si, gradient, powers, context.givenOf);
+  return {
+    uncertainty: isDefined ? uncertainty : null,
+    ...(isDefined ? { budget } : {}),
+    scaling: scalingOf(si, gradient, powers, context.givenOf),
+    ...(normalised ? { normalised } : {}),
+  };
+}
+
 /** `symbol = formula`, or a function definition, with the unit to show it in. */
 export const relationKind: KindOfCell<RelationCell> = {
   kind: "relation",
@@ -134,24 +193,23 @@ export const relationKind: KindOfCell<RelationCell> = {
     const formula = reading.formulas[0] as Formula;
     const head = relationHead(cell, formula.words);
     if (head.parameters) return defineFunction(formula, head, context);
-    const { typed, kernel } = context.formulas.settle(formula, context.scope, "quantity");
-    const of = typed.dimension;
+    const settled = context.formulas.settle(formula, context.scope, "quantity");
+    const of = settled.typed.dimension;
     const unitText = statedUnit(cell, formula.words, of, context.system);
-    const si = kernel.run(
-      kernel.inputs.map((key) => context.value(key)),
-      context.runtime,
-    );
-    const unit = displayUnit(unitText, of, si, context.system);
+    const valued = evaluateWithSlopes(settled, context);
+    const unit = displayUnit(unitText, of, valued.si, context.system);
+    const value = valued.si / unit.factor;
     return {
-      si,
+      ...valued,
       meaning: { kind: "quantity", dimension: of },
       result: {
         kind: "relation",
         status: "ok",
         symbol: head.name,
-        value: si / unit.factor,
+        value,
         unit: unit.text,
-        si: { value: si, dimension: dimensionToJson(of) },
+        si: { value: valued.si, dimension: dimensionToJson(of) },
+        ...assessment(value, unit.factor, valued, context),
       },
     };
   },
