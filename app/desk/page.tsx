@@ -27,8 +27,11 @@ async function readSearch({ searchParams }: DeskProps) {
 
 export default async function DeskPage(props: DeskProps) {
   const person = await currentPerson();
-  if (!person) redirect("/sign-in?return=/desk");
   const { scope, q } = await readSearch(props);
+  if (!person) {
+    const here = `/desk?${new URLSearchParams({ scope, ...(q === "" ? {} : { q }) })}`;
+    redirect(`/sign-in?return=${encodeURIComponent(here)}`);
+  }
   const [own, shared, page] = await Promise.all([
     listCalculations(person, { scope: "mine" }),
     listCalculations(person, { scope: "public" }),

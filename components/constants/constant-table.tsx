@@ -4,7 +4,7 @@ import type { ConstantEntry, EditionValue } from "./shelf-rows";
 
 /** On a narrow page every cell stands under its own heading. */
 const cell =
-  "block py-0.5 align-baseline md:table-cell md:py-2.5 md:pr-5 before:font-sans before:text-xs before:text-faint before:content-[attr(data-label)] before:block md:before:hidden";
+  "block py-0.5 align-baseline lg:table-cell lg:py-2.5 lg:pr-5 before:font-sans before:text-xs before:text-faint before:content-[attr(data-label)] before:block lg:before:hidden";
 const head = "py-2 pr-5 text-left align-bottom font-medium";
 
 function ValueCell({
@@ -18,11 +18,13 @@ function ValueCell({
 }) {
   return (
     <td className={cell} data-label={value.edition}>
-      <span className={`figures ${same ? "text-faint" : ""}`}>
+      <span className={`figures whitespace-nowrap ${same ? "text-faint" : ""}`}>
         <Superscripts text={value.notation} />
-      </span>{" "}
-      {value.exact && <span className="font-sans text-xs text-faint">exact</span>}{" "}
-      <CopyButton text={value.typed} what={`${symbol}, ${value.edition}`} />
+      </span>
+      <span className="flex items-center gap-x-3 font-sans text-xs text-faint">
+        {value.exact && "exact"}
+        <CopyButton text={value.typed} what={`${symbol}, ${value.edition}`} />
+      </span>
     </td>
   );
 }
@@ -30,7 +32,7 @@ function ValueCell({
 function ConstantRow({ entry }: { entry: ConstantEntry }) {
   const [first] = entry.values;
   return (
-    <tr id={entry.symbol} className="block border-b border-rule py-3 target:bg-well md:table-row">
+    <tr id={entry.symbol} className="block border-b border-rule py-3 target:bg-well lg:table-row">
       <th scope="row" className={`${cell} text-left font-normal`}>
         <a href={`#${entry.symbol}`} className="figures font-semibold hover:underline">
           {entry.symbol}
@@ -70,9 +72,9 @@ export function ConstantTable({
 }) {
   const editions = entries[0]?.values.map((value) => value.edition) ?? [];
   return (
-    <table className="block w-full text-sm md:table">
+    <table className="block w-full text-sm lg:table">
       <caption className="sr-only">{caption}</caption>
-      <thead className="hidden border-b border-ink font-sans md:table-header-group">
+      <thead className="hidden border-b border-ink font-sans lg:table-header-group">
         <tr>
           {["Constant", ...editions, "Unit", "What changed", "Source"].map((label) => (
             <th key={label} scope="col" className={head}>
@@ -81,7 +83,7 @@ export function ConstantTable({
           ))}
         </tr>
       </thead>
-      <tbody className="block md:table-row-group">
+      <tbody className="block lg:table-row-group">
         {entries.map((entry) => (
           <ConstantRow key={entry.symbol} entry={entry} />
         ))}

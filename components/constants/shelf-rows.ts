@@ -76,7 +76,8 @@ export function constantEntries(em: EmConvention): ConstantEntry[] {
         editionValue(one, editionTitle(editionNames[index] ?? "codata-2022")),
       ),
       change: changeBetween(oldest, newest),
-      sources: [...new Set(all.map((one) => one.source))],
+      // The edition is the heading of its column.
+      sources: [...new Set(all.map((one) => one.source.replace(/^CODATA \d{4}/, "CODATA")))],
     };
   });
 }

@@ -2,14 +2,14 @@ import { Superscripts } from "@/components/ui/superscripts";
 import type { UnitEntry } from "./shelf-rows";
 
 const cell =
-  "block py-0.5 align-baseline md:table-cell md:py-2 md:pr-5 before:font-sans before:text-xs before:text-faint before:content-[attr(data-label)] before:block md:before:hidden";
+  "block py-0.5 align-baseline lg:table-cell lg:py-2 lg:pr-5 before:font-sans before:text-xs before:text-faint before:content-[attr(data-label)] before:block lg:before:hidden";
 const head = "py-2 pr-5 text-left align-bottom font-medium";
 
 function UnitRow({ entry }: { entry: UnitEntry }) {
   return (
     <tr
       id={`unit-${entry.symbol}`}
-      className="block border-b border-rule py-3 target:bg-well md:table-row"
+      className="block border-b border-rule py-3 target:bg-well lg:table-row"
     >
       <th scope="row" className={`${cell} text-left font-normal`}>
         <span className="figures font-semibold">{entry.symbol}</span>
@@ -48,9 +48,9 @@ export function UnitTable({
 }) {
   const heads = ["Unit", "Name", "Kind", "In coherent SI", "Prefixes", "Source"];
   return (
-    <table className="block w-full text-sm md:table">
+    <table className="block w-full text-sm lg:table">
       <caption className="sr-only">{caption}</caption>
-      <thead className="hidden border-b border-ink font-sans md:table-header-group">
+      <thead className="hidden border-b border-ink font-sans lg:table-header-group">
         <tr>
           {heads.map((label) => (
             <th key={label} scope="col" className={head}>
@@ -59,7 +59,7 @@ export function UnitTable({
           ))}
         </tr>
       </thead>
-      <tbody className="block md:table-row-group">
+      <tbody className="block lg:table-row-group">
         {entries.map((entry) => (
           <UnitRow key={entry.symbol} entry={entry} />
         ))}

@@ -32,7 +32,7 @@ export function ExampleTable({ examples, answer }: { examples: Examples; answer:
           <th scope="col" className="py-1.5 pr-4 text-left font-medium">
             Typed
           </th>
-          <th scope="col" className="py-1.5 pr-4 text-left font-medium">
+          <th scope="col" className="w-24 py-1.5 pr-4 text-left font-medium whitespace-nowrap">
             Makes a
           </th>
           <th scope="col" className="py-1.5 text-left font-medium">

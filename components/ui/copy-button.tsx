@@ -31,12 +31,14 @@ export function CopyButton({
     setTimeout(() => setSaid(undefined), saidMs);
   };
   return (
-    <Button look="quiet" onClick={copy}>
-      {said ?? label}
-      {what && !said && <span className="sr-only">&nbsp;{what}</span>}
+    <>
+      <Button look="quiet" onClick={copy}>
+        {said ?? label}
+        {what && !said && <span className="sr-only">&nbsp;{what}</span>}
+      </Button>
       <span role="status" className="sr-only">
         {said}
       </span>
-    </Button>
+    </>
   );
 }

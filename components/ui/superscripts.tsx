@@ -18,7 +18,8 @@ export function Superscripts({ text }: { text: string }) {
     if (part === "⊙" || part === "⊕") return <sub key={key}>{part}</sub>;
     return (
       <sup key={key}>
-        <span className="sr-only">^</span>
+        {/* Of no size rather than out of the flow, which would break a copied line in three. */}
+        <span className="text-[0px]">^</span>
         {onTheLine(part)}
       </sup>
     );
