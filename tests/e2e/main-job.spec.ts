@@ -31,6 +31,7 @@ async function startFromDesk(page: Page): Promise<void> {
 /** The estimate from the first line to the title, saved. */
 async function writeEstimate(page: Page): Promise<void> {
   for (const line of lines) await write(page, line);
+  await page.getByRole("combobox", { name: "Constants" }).selectOption("CODATA 2018");
   await page.getByLabel("Title").fill("Limiting luminosity of THX 14−2");
   await expectValue(cell(page, "relation (1) L_Edd"), limit);
   await expectSaved(page);
@@ -115,7 +116,7 @@ test("A visitor recomputes a pinned version, takes its file along, and sees it w
 
   await other.getByRole("button", { name: "recompute" }).click();
   await expect(other.getByText(/reproduces/)).toBeVisible();
-  await other.getByLabel("constants").selectOption("CODATA 2018");
+  await other.getByLabel("constants").selectOption("codata-2022");
   await other.getByRole("button", { name: "recompute" }).click();
   const moved = other.getByRole("region", { name: "What moved" });
   await expect(moved.getByRole("row", { name: /L_Edd/ }).first()).toContainText(/1 [+−] \d/);
