@@ -1,3 +1,4 @@
+import "./without-eval";
 import { z } from "zod";
 import { limitSentences, limits } from "./limits";
 
