@@ -13,11 +13,17 @@ const env = { ...process.env, ...local, PORT: port, NODE_ENV: "production" };
 run(process.execPath, ["--conditions=react-server", "--import", "tsx", "scripts/migrate.ts"], env);
 const wantsDemo = env.LOCAL === "1" || env.SEED_DEMO === "1";
 
-const server = spawn(process.execPath, ["node_modules/next/dist/bin/next", "start", "-p", port], {
-  cwd: root,
-  env,
-  stdio: ["ignore", "ignore", "inherit"],
-});
+// A local start shows mail to whoever reaches it, so only this machine does.
+const host = env.LOCAL === "1" ? ["-H", "127.0.0.1"] : [];
+const server = spawn(
+  process.execPath,
+  ["node_modules/next/dist/bin/next", "start", "-p", port, ...host],
+  {
+    cwd: root,
+    env,
+    stdio: ["ignore", "ignore", "inherit"],
+  },
+);
 const stop = () => server.kill("SIGTERM");
 process.on("SIGINT", stop);
 process.on("SIGTERM", stop);

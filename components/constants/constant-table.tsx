@@ -4,7 +4,7 @@ import type { ConstantEntry, EditionValue } from "./shelf-rows";
 
 /** On a narrow page every cell stands under its own heading. */
 const cell =
-  "block py-0.5 align-baseline lg:table-cell lg:py-2.5 lg:pr-5 before:font-sans before:text-xs before:text-faint before:content-[attr(data-label)] before:block lg:before:hidden";
+  "block py-0.5 align-baseline xl:table-cell xl:py-2.5 xl:pr-5 before:font-sans before:text-xs before:text-faint before:content-[attr(data-label)] before:block xl:before:hidden";
 const head = "py-2 pr-5 text-left align-bottom font-medium";
 
 function ValueCell({
@@ -32,7 +32,7 @@ function ValueCell({
 function ConstantRow({ entry }: { entry: ConstantEntry }) {
   const [first] = entry.values;
   return (
-    <tr id={entry.symbol} className="block border-b border-rule py-3 target:bg-well lg:table-row">
+    <tr id={entry.symbol} className="block border-b border-rule py-3 target:bg-well xl:table-row">
       <th scope="row" className={`${cell} text-left font-normal`}>
         <a href={`#${entry.symbol}`} className="figures font-semibold hover:underline">
           {entry.symbol}
@@ -72,9 +72,9 @@ export function ConstantTable({
 }) {
   const editions = entries[0]?.values.map((value) => value.edition) ?? [];
   return (
-    <table className="block w-full text-sm lg:table">
+    <table className="block w-full text-sm xl:table">
       <caption className="sr-only">{caption}</caption>
-      <thead className="hidden border-b border-ink font-sans lg:table-header-group">
+      <thead className="hidden border-b border-ink font-sans xl:table-header-group">
         <tr>
           {["Constant", ...editions, "Unit", "What changed", "Source"].map((label) => (
             <th key={label} scope="col" className={head}>
@@ -83,7 +83,7 @@ export function ConstantTable({
           ))}
         </tr>
       </thead>
-      <tbody className="block lg:table-row-group">
+      <tbody className="block xl:table-row-group">
         {entries.map((entry) => (
           <ConstantRow key={entry.symbol} entry={entry} />
         ))}

@@ -88,6 +88,12 @@ function RelationBody({ cell, result, shown }: CellProps<RelationCell>) {
           <Tex tex={`= ${shown.valueTex}`} />
         </p>
       )}
+      {result?.status === "ok" && shown?.normalisedTex && (
+        <p className="normalised-line">
+          <Tex tex={shown.normalisedTex} />
+          {shown.normalisedLocal && <span className="font-sans text-xs"> locally</span>}
+        </p>
+      )}
       {result?.status === "ok" && "parameters" in result && (
         <p className="value-line font-sans text-sm text-faint">
           a function of {result.parameters.join(", ")}

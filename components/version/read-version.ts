@@ -1,6 +1,6 @@
+import { shownRelation } from "@/lib/expr/value-shown";
 import type { UnitSystem } from "@/lib/physics";
 import type { Cell, CellPresentation, CellResult, EvaluateAnswer, VersionFile } from "@/lib/schema";
-import { recordedValue } from "./recorded-value";
 
 /** A cell of a version with what was recorded for it and how it is typeset. */
 export interface VersionCell {
@@ -20,9 +20,16 @@ function withRecord(
   system: UnitSystem,
 ): CellPresentation | undefined {
   if (!shown || cell.kind !== "relation") return shown;
-  const { valueTex: _tex, valueText: _text, ...rest } = shown;
-  const value = recordedValue(result, system);
-  return value ? { ...rest, valueTex: value.tex, valueText: value.text } : rest;
+  const { number, line, tex, uses, usedBy, constants } = shown;
+  const understood = { line, uses, usedBy, constants };
+  return {
+    ...understood,
+    ...(number === undefined ? {} : { number }),
+    ...(tex === undefined ? {} : { tex }),
+    ...(result?.status === "ok" && "value" in result && result.kind === "relation"
+      ? shownRelation(result, system)
+      : {}),
+  };
 }
 
 /** The cells of a version in reading order; `presentation` is missing if no evaluator was free. */

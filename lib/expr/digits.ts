@@ -44,10 +44,12 @@ export function showExactly(value: number): Shown {
   return { mantissa: digits, exponent: Number(exponent) };
 }
 
-/** “1.26 × 10³⁹”, with a true minus sign. */
+/** “1.26 × 10³⁹”, with a true minus sign; a mantissa of 1 is left out. */
 export function shownText({ mantissa, exponent }: Shown): string {
   const digits = mantissa.replace("-", "−");
-  return exponent === 0 ? digits : `${digits} × 10${superscript(exponent)}`;
+  if (exponent === 0) return digits;
+  const power = `10${superscript(exponent)}`;
+  return mantissa === "1" ? power : `${digits} × ${power}`;
 }
 
 /** The same as TeX; a mantissa of 1 is left out. */

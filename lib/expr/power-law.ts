@@ -38,7 +38,7 @@ function shared(a: Exponents, b: Exponents): Exponents {
 }
 
 function raised(of: Exponents, power: Fraction): Exponents {
-  return new Map([...of].map(([key, exponent]) => [key, exponent && exponent.mul(power)]));
+  return new Map([...of].map(([key, exponent]) => [key, exponent?.mul(power) ?? null]));
 }
 
 /** Whatever is contained is contained in no simple way. */

@@ -1,8 +1,8 @@
-import { formatUnit, type UnitSystem, unitTex } from "../physics";
+import type { UnitSystem } from "../physics";
 import type { CalculationFile, Cell, GivenCell } from "../schema/calculation";
 import type { CellPresentation, Presentation } from "../schema/presentation";
 import type { CellResult, Results } from "../schema/results";
-import { showExactly, showNumber, shownTex, shownText } from "./digits";
+import { showExactly, shownTex, shownText } from "./digits";
 import { cellLine } from "./entry";
 import { canonicalName } from "./normalise";
 import type { Resolved, ResolvedCell } from "./resolve";
@@ -10,21 +10,15 @@ import { builtIn } from "./scope";
 import { formulaTex, type TexContext } from "./tex";
 import { nameTex } from "./tex-names";
 import { concise } from "./value-line";
+import { type ShownForm, shownRelation, withUnit } from "./value-shown";
 
 interface ShownValue {
   readonly valueTex: string;
   readonly valueText: string;
 }
 
-function withUnit(
-  number: { tex: string; text: string },
-  unit: string,
-  system: UnitSystem,
-): ShownValue {
-  if (unit === "") return { valueTex: number.tex, valueText: number.text };
-  const text = formatUnit(unit, system);
-  const joined = /^[%°]/.test(text) ? number.text + text : `${number.text} ${text}`;
-  return { valueTex: `${number.tex}\\,${unitTex(unit, system)}`, valueText: joined };
+function toShown({ tex, text }: ShownForm): ShownValue {
+  return { valueTex: tex, valueText: text };
 }
 
 /** A given is shown with the digits and the uncertainty it was stated with. */
@@ -67,23 +61,23 @@ function uncertainNumber(value: number, uncertainty: number): { tex: string; tex
   return { tex: `${shownTex(a)} \\pm ${shownTex(b)}`, text: `${shownText(a)} ± ${shownText(b)}` };
 }
 
-/** Givens within a factor carry their unit before the words; everything else behind the number. */
+/** A spread written with ± is put in brackets, so that the unit belongs to both numbers. */
+function givenValue(cell: GivenCell, unit: string, system: UnitSystem): ShownForm {
+  const number = givenNumber(cell);
+  const isSpread = number.text.includes(" ± ") && cell.dex === undefined && unit !== "";
+  if (!isSpread) return withUnit(number, unit, system);
+  return withUnit({ tex: `(${number.tex})`, text: `(${number.text})` }, unit, system);
+}
+
 function shownValue(
   cell: Cell,
   result: CellResult | undefined,
   system: UnitSystem,
-): ShownValue | undefined {
-  if (result?.status !== "ok" || !("value" in result)) return undefined;
-  if (cell.kind === "given") {
-    const shown = withUnit(givenNumber(cell), result.unit, system);
-    const inBrackets =
-      shown.valueText.includes(" ± ") && result.unit !== "" && cell.dex === undefined;
-    if (!inBrackets) return shown;
-    const number = givenNumber(cell);
-    return withUnit({ tex: `(${number.tex})`, text: `(${number.text})` }, result.unit, system);
-  }
-  const shown = showNumber(result.value);
-  return withUnit({ tex: shownTex(shown), text: shownText(shown) }, result.unit, system);
+): Partial<CellPresentation> {
+  if (result?.status !== "ok" || !("value" in result)) return {};
+  if (cell.kind === "given") return toShown(givenValue(cell, result.unit, system));
+  if (result.kind !== "relation") return {};
+  return shownRelation(result, system);
 }
 
 function headTex(symbol: string, parameters: readonly string[] | undefined): string {

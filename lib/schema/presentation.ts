@@ -14,6 +14,10 @@ export const cellPresentationSchema = z.object({
   /** “1.26 × 10³⁹ erg s⁻¹” as TeX and as plain text; absent without a value. */
   valueTex: z.string().optional(),
   valueText: z.string().optional(),
+  /** “1.26 × 10³⁹ (M / 10 M⊙) erg s⁻¹”; `normalisedLocal` where some exponent holds only locally. */
+  normalisedTex: z.string().optional(),
+  normalisedText: z.string().optional(),
+  normalisedLocal: z.boolean().optional(),
   /** Ids of the cells this one uses, and of those that use it. */
   uses: z.array(z.string()),
   usedBy: z.array(z.string()),

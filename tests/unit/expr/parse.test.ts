@@ -106,12 +106,12 @@ describe("faults", () => {
   });
 
   it("stops at sixty levels and at two thousand characters", () => {
-    const nested = (levels: number) => "(".repeat(levels) + "x" + ")".repeat(levels);
+    const nested = (levels: number) => `${"(".repeat(levels)}x${")".repeat(levels)}`;
     expect(faultOf(nested(60))).toBeUndefined();
     expect(faultOf(nested(61))?.code).toBe("limit");
     expect(faultOf(`${"-".repeat(100)}x`)?.code).toBe("limit");
-    expect(faultOf("1+".repeat(1_000) + "1")?.code).toBe("limit");
-    expect(faultOf("1+".repeat(900) + "1")).toBeUndefined();
+    expect(faultOf(`${"1+".repeat(1_000)}1`)?.code).toBe("limit");
+    expect(faultOf(`${"1+".repeat(900)}1`)).toBeUndefined();
   });
 
   it("keeps a chain of percentages small", () => {

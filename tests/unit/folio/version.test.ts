@@ -1,13 +1,11 @@
 import { describe, expect, it } from "vitest";
 import { keptLine } from "@/components/typeset/kept-line";
 import { countFaults, versionCells } from "@/components/version/read-version";
-import { recordedValue } from "@/components/version/recorded-value";
 import { ratioText, tellValue } from "@/components/version/tell-difference";
 import { versionMetadata } from "@/components/version/version-metadata";
 import type { CellResult, VersionFile } from "@/lib/schema";
 import { file, relation } from "./a-calculation";
 
-const si = { edition: "codata-2022", em: "si" } as const;
 const luminosity: CellResult = {
   kind: "relation",
   status: "ok",
@@ -89,18 +87,6 @@ describe("a version page", () => {
     expect(robots("public")).toBeUndefined();
     expect(robots("link")).toEqual({ index: false });
     expect(robots("private")).toEqual({ index: false });
-  });
-});
-
-describe("a recorded value", () => {
-  it("has its unit, or none where it is a pure number", () => {
-    expect(recordedValue(luminosity, si)?.text).toBe("1.26 × 10³⁹ erg s⁻¹");
-    expect(recordedValue({ ...luminosity, value: 0.5, unit: "" }, si)?.text).toBe("0.500");
-  });
-  it("is nothing for a check", () => {
-    expect(
-      recordedValue({ kind: "check", status: "ok", holds: true, ratio: 2 }, si),
-    ).toBeUndefined();
   });
 });
 
