@@ -62,10 +62,10 @@ export function relationValue(result: RelationResult, system: UnitSystem): Shown
 
 /** An exponent as a short rational, or to two digits where it is only local. */
 function exponentText(exponent: number, exact: boolean): string {
+  if (!exact) return String(Number(exponent.toPrecision(2)));
   const near = new Fraction(exponent).simplify(1e-10);
-  const isShort = near.d <= 30n && Math.abs(near.valueOf() - exponent) < 1e-9;
-  if (isShort) return near.toFraction();
-  return exact ? String(Number(exponent.toPrecision(4))) : exponent.toPrecision(2);
+  const isShort = near.d <= 100n && Math.abs(near.valueOf() - exponent) < 1e-9;
+  return isShort ? near.toFraction() : String(Number(exponent.toPrecision(4)));
 }
 
 function raisedText(exponent: string): string {

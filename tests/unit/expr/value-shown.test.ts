@@ -59,7 +59,7 @@ describe("the value of a relation", () => {
   it("writes powers as short rationals and says where they are only local", () => {
     const exact = normalisedShown(resultOf("M = 1e6 Msun", "R = Rsun (M / Msun)^(1/3)"), system);
     expect(exact?.text).toBe("100 (M / 10⁶ M⊙)^(1/3) R⊙");
-    const local = normalisedShown(resultOf("eta = 0.1", "t = eta / (1 - eta) s"), system);
+    const local = normalisedShown(resultOf("eta = 0.1", "t = (1 s) eta / (1 - eta)"), system);
     expect(local?.local).toBe(true);
     expect(local?.text).toBe("0.111 (eta / 0.1)^(1.1) s");
   });
