@@ -52,7 +52,7 @@ export function readDraft(id: string): Promise<Sent<Draft>> {
 
 export function pinDraft(
   id: string,
-  pin: { summary: string; acceptErrors?: boolean },
+  pin: { summary: string; acceptErrors?: boolean; revision: number },
 ): Promise<Sent<{ version: number; contentHash: string; url: string }>> {
   return send(`/api/calculations/${id}/versions`, { method: "POST", body: JSON.stringify(pin) });
 }

@@ -13,7 +13,7 @@ interface PinDialogProps {
   readonly visibility: Visibility;
   readonly file: CalculationFile;
   readonly answer: EvaluateAnswer;
-  readonly flush: () => Promise<boolean>;
+  readonly flush: () => Promise<number | undefined>;
   readonly onPinned: (version: Draft["versions"][number]) => void;
   readonly onClose: () => void;
 }
@@ -38,9 +38,11 @@ export function PinDialog(props: PinDialogProps) {
   const { id, open, visibility, file, answer, flush, onPinned, onClose } = props;
   const [pinned, setPinned] = useState<Pinned>();
   const pin = async (summary: string, acceptErrors: boolean): Promise<string | undefined> => {
-    if (!(await flush())) return unsaved;
+    const revision = await flush();
+    if (revision === undefined) return unsaved;
     const sent: Sent<Pinned> = await pinDraft(id, {
       summary,
+      revision,
       ...(acceptErrors ? { acceptErrors } : {}),
     });
     if (!sent.ok) return tellProblem(sent.problem);

@@ -24,8 +24,8 @@ export type SavingStatus =
 
 export interface Saving {
   readonly status: SavingStatus;
-  /** Save now; true once the server has everything. */
-  readonly flush: () => Promise<boolean>;
+  /** Save now; the revision once the server has everything, undefined where it could not. */
+  readonly flush: () => Promise<number | undefined>;
 }
 
 function outcomeOf(problem: Problem | undefined): SavingStatus {
@@ -39,15 +39,15 @@ export function useSaving(id: string, state: FolioState, dispatch: Dispatch<Foli
   const [outcome, setOutcome] = useState<SavingStatus>({ word: "saved" });
   const latest = useRef(state);
   latest.current = state;
-  const running = useRef<Promise<boolean> | null>(null);
+  const running = useRef<Promise<number | undefined> | null>(null);
   const waitMs = useRef(firstRetryMs);
 
   const dirty = state.file !== state.base.file && !sameValue(state.file, state.base.file);
 
-  const saveOnce = useCallback(async (): Promise<boolean> => {
+  const saveOnce = useCallback(async (): Promise<number | undefined> => {
     const { file, base, conflicts } = latest.current;
-    if (conflicts.length > 0) return false;
-    if (sameValue(file, base.file)) return true;
+    if (conflicts.length > 0) return undefined;
+    if (sameValue(file, base.file)) return base.revision;
     setOutcome({ word: "saving" });
     const sent = await saveFile(id, file, base.revision);
     if (sent.ok) {
@@ -56,18 +56,18 @@ export function useSaving(id: string, state: FolioState, dispatch: Dispatch<Foli
       latest.current = { ...latest.current, base: saved };
       dispatch({ type: "saved", base: saved });
       setOutcome({ word: "saved" });
-      return true;
+      return saved.revision;
     }
     if (sent.problem?.status === 412 && sent.problem.current) {
       dispatch({ type: "stale", theirs: sent.problem.current });
       setOutcome({ word: "unsaved" });
-      return false;
+      return undefined;
     }
     setOutcome(outcomeOf(sent.problem));
-    return false;
+    return undefined;
   }, [id, dispatch]);
 
-  const flush = useCallback(async (): Promise<boolean> => {
+  const flush = useCallback(async (): Promise<number | undefined> => {
     while (running.current) await running.current;
     running.current = saveOnce().finally(() => {
       running.current = null;

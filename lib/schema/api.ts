@@ -67,6 +67,8 @@ export const pinSchema = z.strictObject({
   summary: z.string().trim().min(1, "Say in a line what this version is.").max(500),
   /** A version that has errors is pinned only after saying so. */
   acceptErrors: z.boolean().optional(),
+  /** The revision that was looked at; a later one is not pinned unseen. */
+  revision: z.int().positive().optional(),
 });
 export const withdrawSchema = z.strictObject({
   reason: z.string().trim().min(1, "Give the reason; readers will see it.").max(2_000),
