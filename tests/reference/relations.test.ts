@@ -13,8 +13,15 @@ import relations from "./relations.json";
  */
 const tolerance = 1e-9;
 
-type Row = (typeof relations)[number] & { givens: [string, number, string, string][] };
-const rows = relations as unknown as Row[];
+interface Row {
+  readonly id: string;
+  /** Symbol, value, our unit, and the same unit as the Python library spells it. */
+  readonly givens: readonly (readonly [string, number, string, string])[];
+  readonly formula: string;
+  readonly unit: readonly [string, string];
+  readonly source: string;
+}
+const rows = relations as unknown as readonly Row[];
 
 function calculation(row: Row): CalculationFile {
   const givens = row.givens.map(([symbol, value, unit], i) => ({
@@ -24,7 +31,7 @@ function calculation(row: Row): CalculationFile {
     value,
     unit,
   }));
-  const [unit = ""] = row.unit;
+  const [unit] = row.unit;
   return {
     format: "leading-order/1",
     title: row.id,
