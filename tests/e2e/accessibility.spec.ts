@@ -32,14 +32,14 @@ for (const colorScheme of ["light", "dark"] as const) {
   test.describe(`by ${colorScheme === "light" ? "day" : "night"}`, () => {
     test.use({ colorScheme, reducedMotion: "reduce" });
 
-    test("I meet no barrier before I have an account", async ({ page }) => {
-      for (const path of forVisitors) {
+    for (const path of forVisitors) {
+      test(`I meet no barrier at ${path} before I have an account`, async ({ page }) => {
         await page.goto(path);
         // All rows of the long table are alike; a few of them are looked at.
         if (path === "/constants") await page.getByRole("searchbox").fill("electron");
         await expectAccessible(page, path);
-      }
-    });
+      });
+    }
 
     test("I meet no barrier at the desk, in Settings, and on a version", async ({
       page,

@@ -34,8 +34,9 @@ for (const { name, ...look } of looks) {
     const picture = async (page: Page, what: string) => {
       await page.evaluate(() => document.fonts.ready);
       const path = `${folder}/${what}-${name}.png`;
-      // The table of constants is as long as ten screens.
-      const taken = await page.screenshot({ path, fullPage: what !== "constants" });
+      // The tables of these two are as long as ten screens.
+      const isLong = what === "constants" || what === "help";
+      const taken = await page.screenshot({ path, fullPage: !isLong });
       expect(taken.length).toBeGreaterThan(5_000);
     };
 
