@@ -1,5 +1,6 @@
 import { derivatives } from "./derivatives";
 import { findFunction } from "./functions";
+import { numberText, powerText } from "./kernel-text";
 import { nativeFunctions } from "./kernels";
 import { minus, none, over, plus, slopeAt, times } from "./slopes";
 import type { FunctionInstance, InputKey, Local, Typed } from "./typed";
@@ -389,13 +390,4 @@ export class Emitter {
     });
     return { value, slopes };
   }
-}
-
-function numberText(value: number): string {
-  return value < 0 || Object.is(value, -0) ? `(${value})` : String(value);
-}
-
-function powerText(a: string, b: string, exponent: number | undefined): string {
-  if (exponent === 2) return `${a} * ${a}`;
-  return exponent === 3 ? `${a} * ${a} * ${a}` : `Math.pow(${a}, ${b})`;
 }
