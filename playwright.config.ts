@@ -6,8 +6,8 @@ const port = 4200;
 export default defineConfig({
   testDir: "tests/e2e",
   outputDir: "test-results/e2e",
-  timeout: 60_000,
-  expect: { timeout: 10_000 },
+  timeout: 120_000,
+  expect: { timeout: 20_000 },
   workers: 2,
   fullyParallel: true,
   reporter: [["list"], ["json"]],
