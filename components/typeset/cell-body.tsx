@@ -91,7 +91,7 @@ function RelationBody({ cell, result, shown }: CellProps<RelationCell>) {
       {result?.status === "ok" && shown?.normalisedTex && (
         <p className="normalised-line">
           <Tex tex={shown.normalisedTex} />
-          {shown.normalisedLocal && <span className="font-sans text-xs"> locally</span>}
+          {shown.normalisedLocal && <span className="ml-2 font-sans text-xs">local</span>}
         </p>
       )}
       {result?.status === "ok" && "parameters" in result && (

@@ -96,7 +96,14 @@ export function editedCell(cell: Cell, line: string, system: UnitSystem): Cell {
     const value = (cell as Record<string, unknown>)[field];
     if (value !== undefined && made.kind === cell.kind) kept[field] = value;
   }
+  if (sameInterval(made, cell)) kept.value = cell.value;
   return { ...made, ...kept, id: cell.id } as Cell;
+}
+
+/** An interval's line does not show a value off its middle; while the interval stays, so does it. */
+function sameInterval(made: NewCell, cell: Cell): cell is GivenCell {
+  if (made.kind !== "given" || cell.kind !== "given") return false;
+  return made.interval !== undefined && String(made.interval) === String(cell.interval);
 }
 
 /** Where a field of a cell begins in its line, so that a fault can be marked there. */

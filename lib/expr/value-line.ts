@@ -1,24 +1,30 @@
 import type { GivenCell } from "../schema/calculation";
 
+/** A number as one would type it: 1e9 rather than nine zeros, 4e38 rather than 4e+38. */
+function typed(value: number): string {
+  const text = String(value);
+  const isLong = /0{5}$/.test(text) && !text.includes(".");
+  return (isLong ? value.toExponential() : text).replace("e+", "e");
+}
+
 /** A given's value as one would type it: the inverse of `readValue`. */
 export function valueLine(cell: GivenCell): string {
   const unit = cell.unit ? ` ${cell.unit}` : "";
   if (cell.interval) {
-    const middle = Number(((cell.interval[0] + cell.interval[1]) / 2).toPrecision(15));
-    // An interval whose value is not its middle has no one-line form; the value is kept in the file.
-    if (middle === cell.value) return `${cell.interval[0]} .. ${cell.interval[1]}${unit}`;
-    return `${cell.interval[0]} .. ${cell.interval[1]}${unit}`;
+    const [lower, upper] = cell.interval;
+    return `${typed(lower)} .. ${typed(upper)}${unit}`;
   }
-  if (cell.dex !== undefined) return `${cell.value} ± ${cell.dex} dex${unit}`;
-  if (cell.factor !== undefined) return `${cell.value}${unit} within a factor ${cell.factor}`;
+  if (cell.dex !== undefined) return `${typed(cell.value)} ± ${cell.dex} dex${unit}`;
+  if (cell.factor !== undefined)
+    return `${typed(cell.value)}${unit} within a factor ${cell.factor}`;
   if (cell.uncertainty !== undefined)
     return `${withUncertainty(cell.value, cell.uncertainty)}${unit}`;
-  return `${cell.value}${unit}`;
+  return `${typed(cell.value)}${unit}`;
 }
 
 /** `0.34(2)` where the figures allow it exactly, else `4.3 ± 0.015`. */
 export function withUncertainty(value: number, uncertainty: number): string {
-  return concise(value, uncertainty) ?? `${value} ± ${uncertainty}`;
+  return concise(value, uncertainty) ?? `${typed(value)} ± ${typed(uncertainty)}`;
 }
 
 /** Parenthesis notation, where value and uncertainty come back from it to the last bit. */

@@ -81,7 +81,7 @@ function showTerm(term: Term, exact: boolean, system: UnitSystem): ShownForm {
   const exponent = exponentText(term.exponent, exact);
   const power = exponent === "1" ? "" : `^{${exponent}}`;
   return {
-    tex: `\\left(\\frac{${nameTex(term.symbol)}}{${below.tex}}\\right)${power}`,
+    tex: `\\left(${nameTex(term.symbol)} / ${below.tex}\\right)${power}`,
     text: `(${term.symbol} / ${below.text})${raisedText(exponent)}`,
   };
 }
