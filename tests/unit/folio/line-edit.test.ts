@@ -21,6 +21,11 @@ describe("typing into a source line", () => {
       cell: { kind: "given", value: 2 },
     });
   });
+  it("keeps a value off the middle of its interval while the interval stays", () => {
+    const odd: Cell = { id: "z", kind: "given", symbol: "z", value: 0.012, interval: [0.01, 0.02] };
+    expect(typeLine(odd, "z_1 = 0.01 .. 0.02", si)).toMatchObject({ cell: { value: 0.012 } });
+    expect(typeLine(odd, "z_1 = 0.01 .. 0.03", si)).toMatchObject({ cell: { value: 0.02 } });
+  });
   it("waits while the line says nothing", () => {
     expect(typeLine(relation("a", "L", "2 M"), "L =", si)).toEqual({ pending: "L =" });
     expect(typeLine(relation("a", "L", "2 M"), "", si)).toEqual({ pending: "" });
