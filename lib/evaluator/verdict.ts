@@ -1,3 +1,4 @@
+import { equalWithin } from "@/lib/expr/equal-within";
 import type { CellResult, Difference, Results, Verdict } from "@/lib/schema";
 
 /** Values agree when they differ by less than this fraction of the larger. */
@@ -8,9 +9,9 @@ export const uncertaintyTolerance = 1e-9;
 type Scalar = Difference["recorded"];
 
 /** Equal to within a relative tolerance; zero equals only zero, null only null. */
-function equalWithin(tolerance: number, a: Scalar | undefined, b: Scalar | undefined): boolean {
+function sameWithin(tolerance: number, a: Scalar | undefined, b: Scalar | undefined): boolean {
   if (typeof a !== "number" || typeof b !== "number") return (a ?? null) === (b ?? null);
-  return a === b || Math.abs(a - b) <= tolerance * Math.max(Math.abs(a), Math.abs(b));
+  return equalWithin(a, b, tolerance);
 }
 
 /** recomputed / recorded for two numbers; null where that says nothing. */
@@ -41,7 +42,7 @@ function listOf(result: CellResult): Scalar[] {
 function listDifference(cell: string, was: Scalar[], is: Scalar[], symbol: { symbol?: string }) {
   const length = Math.max(was.length, is.length);
   const at = Array.from({ length }, (_, i) => i).find(
-    (i) => i >= was.length || i >= is.length || !equalWithin(valueTolerance, was[i], is[i]),
+    (i) => i >= was.length || i >= is.length || !sameWithin(valueTolerance, was[i], is[i]),
   );
   return at === undefined
     ? []
@@ -85,7 +86,7 @@ function cellDifferences(cell: string, recorded: CellResult, recomputed: CellRes
   const scalars = compared.flatMap(({ what, tolerance }) => {
     const was = field(recorded, what);
     const is = field(recomputed, what);
-    if (equalWithin(tolerance, was, is)) return [];
+    if (sameWithin(tolerance, was, is)) return [];
     return [difference(cell, what, was ?? null, is ?? null, symbol)];
   });
   return [...scalars, ...listDifference(cell, listOf(recorded), listOf(recomputed), symbol)];
