@@ -8,7 +8,13 @@ import {
   nameExamples,
 } from "@/components/help/examples";
 import { HelpContents } from "@/components/help/help-section";
-import { FormulasPart, GivensPart, LinesPart, NamesPart } from "@/components/help/language-parts";
+import {
+  FormulasPart,
+  GivensPart,
+  LinesPart,
+  NamesPart,
+  ResultsPart,
+} from "@/components/help/language-parts";
 import {
   ConventionsPart,
   ErrorsPart,
@@ -41,6 +47,7 @@ export default async function HelpPage() {
           <LinesPart answer={lines} />
           <GivensPart answer={givens} />
           <FormulasPart answer={formulas} />
+          <ResultsPart />
           <NamesPart answer={names} />
           <UnitsPart />
           <ConstantsPart />

@@ -5,6 +5,7 @@ export const helpParts = [
   ["lines", "A line makes a cell"],
   ["givens", "Givens and their uncertainty"],
   ["formulas", "Formulas"],
+  ["results", "Results, their uncertainty and scaling"],
   ["names", "Names"],
   ["units", "Units"],
   ["constants", "Constants"],

@@ -36,6 +36,29 @@ export function GivensPart({ answer }: WithAnswer) {
   );
 }
 
+/** What a relation's result says beside its value. */
+export function ResultsPart() {
+  return (
+    <HelpSection part="results">
+      <p>
+        The uncertainty of a relation is propagated to first order from its givens and constants.
+        What two inputs share is counted once: <code>x - x</code> is exact, and <code>G</code>{" "}
+        cancels in <code>G M</code> where the mass is stated in solar masses. Where a given is
+        uncertain by a good part of itself, first order is rough.
+      </p>
+      <p>
+        A value with an uncertain given is shown to the second figure of its uncertainty, 1.257(63)
+        × 10³⁹; any other to three figures, though results and version files keep all of them.
+      </p>
+      <p>
+        Under it stands the form for a paper, 1.26 × 10³⁹ (M / 10 M⊙) erg s⁻¹: the value at the
+        fiducials, which are the values unless a given states others, times powers of each given.
+        Where an exponent is not that of a true power law, the line says <em>local</em>.
+      </p>
+    </HelpSection>
+  );
+}
+
 /** What a formula may hold and how it binds. */
 export function FormulasPart({ answer }: WithAnswer) {
   return (
