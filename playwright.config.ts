@@ -1,6 +1,11 @@
+import { existsSync } from "node:fs";
 import { defineConfig } from "@playwright/test";
 
 const port = 4200;
+
+/** Debian's Chromium; where its headless shell is there, that, which is the lighter of the two. */
+const shell = "/usr/bin/chromium-headless-shell";
+const chromium = existsSync(shell) ? shell : "/usr/bin/chromium";
 
 /** Browser tests against a production build, with a database and mail of their own. */
 export default defineConfig({
@@ -17,7 +22,7 @@ export default defineConfig({
     timezoneId: "UTC",
     trace: "retain-on-failure",
     launchOptions: {
-      executablePath: "/usr/bin/chromium",
+      executablePath: chromium,
       args: [
         "--no-sandbox",
         "--disable-gpu",
