@@ -1,6 +1,6 @@
 "use client";
 
-import { type DragEvent, memo, useState } from "react";
+import { type DragEvent, memo, useDeferredValue, useState } from "react";
 import { CellBody, kindNames } from "@/components/typeset/cell-body";
 import { CellFaults } from "@/components/typeset/cell-faults";
 import { KeptCell } from "@/components/typeset/kept-cell";
@@ -72,7 +72,16 @@ function nameOf(cell: Cell, index: number, shown: CellPresentation | undefined):
 }
 
 /** The cell as it is read; a click on it opens its source. */
+/** The value is painted first; the form for a paper, which takes longer to set, follows it. */
+function useValueFirst(shown: CellPresentation | undefined): CellPresentation | undefined {
+  const later = useDeferredValue(shown?.normalisedTex);
+  if (shown === undefined || later === shown.normalisedTex) return shown;
+  const { normalisedTex: _now, ...rest } = shown;
+  return later === undefined ? rest : { ...rest, normalisedTex: later };
+}
+
 function ReadCell({ cell, result, shown, isOpen, system, acts }: FolioCellProps) {
+  const valueFirst = useValueFirst(shown);
   const isKept = cell.kind === "sweep" || cell.kind === "solve";
   return (
     // biome-ignore lint/a11y/useKeyWithClickEvents: Enter on the cell around it does the same.
@@ -88,7 +97,7 @@ function ReadCell({ cell, result, shown, isOpen, system, acts }: FolioCellProps)
       {isKept ? (
         <KeptCell cell={cell} result={result} system={system} />
       ) : (
-        <CellBody cell={cell} result={result} shown={shown} />
+        <CellBody cell={cell} result={result} shown={valueFirst} />
       )}
     </div>
   );
