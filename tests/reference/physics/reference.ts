@@ -1,5 +1,4 @@
-import { execFile } from "node:child_process";
-import { fileURLToPath } from "node:url";
+import { askPython } from "../python";
 
 interface Figure {
   readonly value: number;
@@ -31,16 +30,7 @@ export interface Question {
   readonly planck: readonly (readonly [hertz: number, kelvin: number])[];
 }
 
-const python = "/usr/bin/python3";
-const script = fileURLToPath(new URL("reference.py", import.meta.url));
-
-/** Asks SciPy and Astropy; fails with what Python said where they are missing. */
+/** Asks SciPy and Astropy. */
 export function askLibraries(question: Question): Promise<Reference> {
-  return new Promise((resolve, reject) => {
-    const child = execFile(python, [script], { timeout: 60_000 }, (error, out, said) => {
-      if (error) reject(new Error(`Python 3 with SciPy and Astropy is needed. ${said}`));
-      else resolve(JSON.parse(out) as Reference);
-    });
-    child.stdin?.end(JSON.stringify(question));
-  });
+  return askPython("physics/reference.py", question);
 }
