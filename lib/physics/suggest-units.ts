@@ -10,7 +10,21 @@ const symbolsOfUnits: Readonly<Record<string, string>> = {
   a: "yr",
   b: "barn",
   R: "rayleigh",
+  sec: "s",
+  year: "yr",
+  years: "yr",
+  Msol: "Msun",
+  Rsol: "Rsun",
+  Lsol: "Lsun",
 };
+
+/** `pc` for `parsec`, `s` for `seconds`: the name of a unit written out. */
+function writtenOut(name: string, units: readonly ListedUnit[]): string[] {
+  const wanted = name.toLowerCase();
+  return units
+    .filter((unit) => [unit.name, `${unit.name}s`].includes(wanted))
+    .map(({ symbol }) => symbol);
+}
 
 function namesOf(unit: ListedUnit): string[] {
   return [unit.symbol, ...unit.aliases];
@@ -43,6 +57,7 @@ export function suggestUnits(name: string, system: UnitSystem): string[] {
     .filter(({ far }) => far <= most)
     .sort((a, b) => a.far - b.far)
     .map(({ candidate }) => candidate);
-  const all = [...(known ? [known] : []), ...inAnotherCase(name, units), ...close];
+  const named = [...(known ? [known] : []), ...writtenOut(name, units)];
+  const all = [...named, ...inAnotherCase(name, units), ...close];
   return [...new Set(all)].filter((one) => findUnit(one, system)).slice(0, 3);
 }

@@ -19,8 +19,18 @@ describe("suggestUnits", () => {
     ["jy", "Jy"],
     ["Angstroms", "Angstrom"],
     ["arcsecs", "arcsec"],
+    ["parsec", "pc"],
+    ["seconds", "s"],
+    ["Kelvin", "K"],
+    ["sec", "s"],
+    ["years", "yr"],
+    ["Msol", "Msun"],
   ])("takes %s for a slip of %s", (name, meant) => {
     expect(suggestUnits(name, si)).toContain(meant);
+  });
+
+  it("puts a unit written out before a likeness", () => {
+    expect(suggestUnits("parsec", si)[0]).toBe("pc");
   });
 
   it("names units that exist, three at most, never what was typed", () => {
