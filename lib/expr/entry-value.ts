@@ -17,7 +17,7 @@ const within = new RegExp(
 );
 const range = new RegExp(`^(${number})\\s*\\.\\.\\s*(${number})(?![\\d.])\\s*(.*)$`);
 const inBrackets = new RegExp(
-  `^\\(\\s*(${number})\\s*${plusMinus}\\s*(${number})\\s*\\)\\s*(?:[eE]\\s*([-+]?\\d+)|[*×]\\s*10\\^\\(?([-+]?\\d+)\\)?)?\\s*(.*)$`,
+  `^\\(\\s*(${number})\\s*${plusMinus}\\s*(${number})\\s*\\)\\s*(?:[eE]\\s*([-+]?\\d+)|[*×·⋅]\\s*10\\^\\(?([-+]?\\d+)\\)?)?\\s*(.*)$`,
 );
 const sharedPower = new RegExp(
   `^(${plain})\\s*${plusMinus}\\s*(${plain})\\s+[eE]([-+]?\\d+)\\s*(.*)$`,
@@ -33,13 +33,13 @@ function plainNumbers(text: string): string {
   return text
     .replace(/[−–]/g, "-")
     .replace(/[\u00a0\u2009\u202f]/g, " ")
-    .replace(/(\d)\s*[×·*]\s*10([⁻⁺]?[⁰¹²³⁴⁵⁶⁷⁸⁹]+)/gu, (_, digit: string, power: string) => {
+    .replace(/(\d)\s*[×·⋅*]\s*10([⁻⁺]?[⁰¹²³⁴⁵⁶⁷⁸⁹]+)/gu, (_, digit: string, power: string) => {
       const plainPower = [...power]
         .map((ch) => (ch === "⁻" ? "-" : ch === "⁺" ? "" : superscripts.indexOf(ch)))
         .join("");
       return `${digit}e${plainPower}`;
     })
-    .replace(/(\d)\s*[×*]\s*10\^\(?([-+]?\d+)\)?/g, "$1e$2");
+    .replace(/(\d)\s*[×·⋅*]\s*10\^\(?([-+]?\d+)\)?/g, "$1e$2");
 }
 
 /** Scale a decimal text by a power of ten without a rounding of its own. */

@@ -1,6 +1,7 @@
 import { parseUnit, type UnitSystem } from "../physics";
 import type { Cell, CheckCell, GivenCell, RelationCell, TextCell } from "../schema/calculation";
 import { readValue } from "./entry-value";
+import { greekNames } from "./normalise";
 import { valueLine } from "./value-line";
 
 /**
@@ -13,8 +14,9 @@ export type NewCell = DistributiveOmit<Cell, "id">;
 type DistributiveOmit<T, K extends PropertyKey> = T extends unknown ? Omit<T, K> : never;
 
 const name = "[\\p{L}][\\p{L}\\p{N}_\\p{M}⊙☉⊕₀-₉]*";
-const definition = new RegExp(`^\\s*(${name}(?:\\s*\\([^()=]*\\))?)\\s*=(?!=)\\s*(.*)$`, "su");
-const comparison = /<=|>=|==|!=|[<>≤≥≠]/;
+const definition = new RegExp(`^\\s*(${name}(?:\\s*\\([^()=]*\\))?)\\s*=(?![=>])\\s*(.*)$`, "su");
+// An arrow (`->`, `=>`) compares nothing.
+const comparison = /<=|>=|==|!=|[<≤≥≠]|(?<![-=])>/;
 
 /** True where a line compares two things rather than being a sentence with a `<` in it. */
 function looksLikeCondition(line: string): boolean {
@@ -26,12 +28,16 @@ function looksLikeCondition(line: string): boolean {
 
 const prose = /[\p{L}]{2,}[ ,;:.]+[\p{L}]{3,}[ ,;:.]+[\p{L}]{2,}/u;
 
+/** Words that stand side by side in formulas as they do in prose. */
+const formulaWords = new RegExp(
+  `(?<!\\p{L})(?:and|or|not|\\p{L}+dot|${[...greekNames].join("|")})(?!\\p{L})`,
+  "gu",
+);
+/** A colon belongs to a formula behind a question mark only. */
+const foreign = /[$`#"“”;]|^[^?]*:/;
+
 function isFormulaLike(part: string): boolean {
-  return (
-    part.trim() !== "" &&
-    !/[$`#"“”:;]/.test(part) &&
-    !prose.test(part.replace(/\b(and|or|not)\b/g, "+"))
-  );
+  return part.trim() !== "" && !foreign.test(part) && !prose.test(part.replace(formulaWords, "+"));
 }
 
 function toGiven(symbol: string, right: string, system: UnitSystem): NewCell | undefined {
@@ -42,6 +48,8 @@ function toGiven(symbol: string, right: string, system: UnitSystem): NewCell | u
   const isUnit = parseUnit(trimmed, system).ok;
   const statesUncertainty = Object.keys(value).length > 1;
   if (!isUnit && !statesUncertainty) return undefined;
+  // A file holds finite numbers only; as a formula it gets the engine's fault.
+  if (!Object.values(value).flat().every(Number.isFinite)) return undefined;
   return { kind: "given", symbol, ...value, ...(trimmed ? { unit: trimmed } : {}) };
 }
 
@@ -60,8 +68,10 @@ export function readEntry(line: string, system: UnitSystem): NewCell {
   if (match) {
     const symbol = (match[1] ?? "").trim();
     const right = (match[2] ?? "").trim();
-    if (isFormulaLike(right) || readValue(right)) {
-      return toGiven(symbol, right, system) ?? { kind: "relation", symbol, ...splitUnit(right) };
+    const split = splitUnit(right);
+    const hasUnit = split.unit !== undefined && parseUnit(split.unit, system).ok;
+    if (isFormulaLike(hasUnit ? split.formula : right) || readValue(right)) {
+      return toGiven(symbol, right, system) ?? { kind: "relation", symbol, ...split };
     }
   }
   if (looksLikeCondition(line)) return { kind: "check", condition: line.trim() };
