@@ -75,6 +75,26 @@ export function brent(f: Expression, bracket: Bracket): number {
   return b;
 }
 
+/**
+ * True where a change of sign between `ends` is a zero at `x`, not a pole: at a zero an expression is
+ * no larger than at both ends.
+ */
+export function isZero(atRoot: number, ends: readonly [number, number]): boolean {
+  return Math.abs(atRoot) <= Math.min(Math.abs(ends[0]), Math.abs(ends[1]));
+}
+
+/** The first zero of the range; poles, where the sign changes too, are passed over. */
+export function firstZero(f: Expression, from: number, to: number): number | undefined {
+  // The rest of the range is looked at only where the first change of sign is a pole.
+  for (const most of [1, samples]) {
+    for (const bracket of findBrackets(f, from, to, most)) {
+      const x = brent(f, bracket);
+      if (isZero(f(x), [f(bracket.from), f(bracket.to)])) return x;
+    }
+  }
+  return undefined;
+}
+
 /** The step to the zero of the secant or of the inverse parabola, from b. */
 function interpolate(a: number, b: number, c: number, fa: number, fb: number, fc: number) {
   if (Math.abs(fa) <= Math.abs(fb)) return undefined;

@@ -2,7 +2,7 @@ import { equalWithin } from "./equal-within";
 import { type Fault, raise } from "./faults";
 import { growsBeyond } from "./kernels";
 import { quadrature } from "./quadrature";
-import { brent, findBrackets } from "./root-finding";
+import { firstZero } from "./root-finding";
 
 /** Elementary calls that one evaluation of a calculation may take in all. */
 export const stepBudget = 20_000_000;
@@ -10,6 +10,8 @@ export const stepBudget = 20_000_000;
 const mostTerms = 10_000_000;
 /** An integral whose error estimate stays above this has not converged. */
 const integralTolerance = 1e-8;
+/** The same against the integral of the absolute value, where positive and negative parts cancel. */
+const cancelledTolerance = 1e-12;
 
 type Body = (x: number) => number;
 
@@ -78,9 +80,10 @@ export class Runtime {
   }
 
   integrate(body: Body, lower: number, upper: number, from: number, to: number): number {
-    const { value, error } = quadrature(body, lower, upper);
+    const { value, error, size } = quadrature(body, lower, upper);
     if (!Number.isFinite(value)) fail("overflow", "too-large", from, to);
-    if (error > integralTolerance * Math.abs(value) && error > 1e-300) {
+    const tolerated = Math.max(integralTolerance * Math.abs(value), cancelledTolerance * size);
+    if (error > tolerated && error > 1e-300) {
       fail("domain", "integral-diverges", from, to);
     }
     return value;
@@ -107,12 +110,10 @@ export class Runtime {
   }
 
   root(body: Body, lower: number, upper: number, from: number, to: number): number {
-    const bracket = findBrackets(body, lower, upper)[0];
-    if (!bracket) {
-      const ends = { lower: String(body(lower)), upper: String(body(upper)) };
-      return fail("no-solution", "no-root", from, to, ends);
-    }
-    return brent(body, bracket);
+    const zero = firstZero(body, lower, upper);
+    if (zero !== undefined) return zero;
+    const ends = { lower: String(body(lower)), upper: String(body(upper)) };
+    return fail("no-solution", "no-root", from, to, ends);
   }
 }
 

@@ -59,7 +59,7 @@ const sentences: Record<string, Sentence> = {
   arity: (_, t) =>
     `This call has ${t.text("found")} argument${t.text("found") === "1" ? "" : "s"}; it is written ${t.text("signature")}.`,
   "bound-name": (_, t) =>
-    `${t.text("of")} is written ${t.text("of")}(expression, variable, from, to): the second argument is a plain name.`,
+    `“${t.text("of")}” is written ${t.text("of")}(expression, variable, from, to): the second argument is a plain name.`,
   head: () =>
     "In front of `=` stands a symbol, such as L_Edd, or a function with its arguments, such as f(x, y).",
   "head-twice": () => "The arguments of a function need different names.",
@@ -89,13 +89,13 @@ const sentences: Record<string, Sentence> = {
   "not-dimensionless": (f, t) =>
     `${inArgument(t)} must be dimensionless; this is ${t.dimension("found")}.${converterHint(f, t)}`,
   argument: (_, t) =>
-    `${t.text("of")} takes ${t.dimension("expected")} here; this is ${t.dimension("found")}: ${t.between("found", "expected")}.`,
+    `“${t.text("of")}” takes ${t.dimension("expected")} here; this is ${t.dimension("found")}: ${t.between("found", "expected")}.`,
   "exponent-unknown": (_, t) =>
     `A power of ${t.dimension("found")} needs an exponent that is a plain number, such as 2 or 1/3, or a given without uncertainty: its dimension must be known before anything is evaluated.`,
   "root-degree": () =>
     "The degree of this root must be a plain number other than zero: the dimension of the result must be known before anything is evaluated.",
   "not-electromagnetic": (_, t) =>
-    `${t.text("of")} converts electromagnetic quantities; it knows no counterpart of ${t.dimension("found")}.`,
+    `“${t.text("of")}” converts electromagnetic quantities; it knows no counterpart of ${t.dimension("found")}.`,
 
   "unit-missing": () => "A unit is missing behind `to`.",
   "unit-syntax": (_, t) =>
@@ -117,7 +117,7 @@ const sentences: Record<string, Sentence> = {
   "division-by-zero": () => "This divides by zero for the values given.",
   "root-of-negative": (_, t) =>
     `A negative number (${t.text("base")}) to the power ${t.text("exponent")} is not real. For odd roots write cbrt(…) or nthRoot(…, n).`,
-  "function-domain": (_, t) => `${t.text("name")} is not defined for the value it is given here.`,
+  "function-domain": (_, t) => `“${t.text("name")}” is not defined for the value it is given here.`,
   undefined: () => "This has no defined value for the values given.",
   "too-large": () =>
     "The result is larger than a double holds (1.8 × 10³⁰⁸ in SI). Group the factors differently, or use logarithms.",
@@ -131,7 +131,7 @@ const sentences: Record<string, Sentence> = {
   steps: () =>
     `This calculation needs more than ${stepBudget / 1e6} million evaluations of the expressions in its sums, integrals and functions. Shorten the sums or avoid integrals inside integrals.`,
   "no-root": (_, t) =>
-    `The expression does not change its sign between the limits (it is ${short(t.text("lower"))} at the lower and ${short(t.text("upper"))} at the upper, in SI). Widen the range.`,
+    `No zero of the expression was found between the limits (it is ${short(t.text("lower"))} at the lower and ${short(t.text("upper"))} at the upper, in SI). Widen the range.`,
 
   "not-a-given": (_, t) =>
     `“${t.text("symbol")}” is not a given of this calculation. Only a given can be varied or solved for.`,

@@ -189,7 +189,9 @@ function callPiece(tree: Extract<Tree, { type: "call" }>, context: TexContext): 
   const texts = parts.map((part, i) =>
     isLoop && i === 0 ? wrapped(part, Binding.Product) : part.tex,
   );
-  const set = context.isQuantity(tree.name) ? undefined : findFunction(tree.name)?.tex;
+  const entry = context.isQuantity(tree.name) ? undefined : findFunction(tree.name);
+  const [fewest, most] = entry?.arity ?? [0, 0];
+  const set = parts.length >= fewest && parts.length <= most ? entry?.tex : undefined;
   if (!set)
     return {
       tex: `${nameTex(tree.name)}\\left(${texts.join(", ")}\\right)`,

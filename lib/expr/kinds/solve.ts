@@ -3,7 +3,7 @@ import { requireUnit } from "../cell-faults";
 import { chainFrom, dependsOn } from "../chain";
 import { raise } from "../faults";
 import { canonicalName } from "../normalise";
-import { brent, spread } from "../root-finding";
+import { brent, isZero, spread } from "../root-finding";
 import type { EvaluationContext, KindOfCell } from "./kind";
 import { requireGiven, requireRelation } from "./sweep";
 
@@ -31,9 +31,7 @@ function rootsOf(f: (x: number) => number | null, from: number, to: number): num
     // A gap in the domain is no change of sign.
     else if (y !== null && before && before.y !== 0 && Math.sign(before.y) !== Math.sign(y)) {
       const root = brent((at) => f(at) ?? Number.NaN, { from: before.x, to: x });
-      // A pole changes the sign too; at a root the expression is smaller than at both ends.
-      const value = Math.abs(f(root) ?? Number.POSITIVE_INFINITY);
-      if (value <= Math.min(Math.abs(before.y), Math.abs(y))) roots.push(root);
+      if (isZero(f(root) ?? Number.POSITIVE_INFINITY, [before.y, y])) roots.push(root);
     }
     before = y === null ? undefined : { x, y };
   }
