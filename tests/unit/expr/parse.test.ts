@@ -1,32 +1,12 @@
 import { describe, expect, it } from "vitest";
 import { attempt } from "@/lib/expr/faults";
 import { readFormula, readWords } from "@/lib/expr/formula";
-import type { Tree } from "@/lib/expr/tree";
+import { shape } from "./tree-shape";
 
 const roles = {
   functions: new Set(["f"]),
   quantities: new Set(["x", "y", "gamma", "M"]),
 };
-
-/** The tree in a compact notation with every bracket written. */
-function shape(tree: Tree): string {
-  switch (tree.type) {
-    case "number":
-      return tree.text;
-    case "name":
-      return tree.name;
-    case "unary":
-      return `(${tree.operator} ${shape(tree.argument)})`;
-    case "binary":
-      return `(${shape(tree.left)} ${tree.implicit ? "." : tree.operator} ${shape(tree.right)})`;
-    case "comparison":
-      return `(${tree.parts.map(shape).join(` ${tree.operators.join(" ")} `)})`;
-    case "conditional":
-      return `(${shape(tree.test)} ? ${shape(tree.yes)} : ${shape(tree.no)})`;
-    case "call":
-      return `${tree.name}(${tree.parts.map(shape).join(", ")})`;
-  }
-}
 
 const parse = (typed: string) => shape(readFormula(readWords(typed), roles).tree);
 function faultOf(typed: string) {
