@@ -49,7 +49,8 @@ export function shownText({ mantissa, exponent }: Shown): string {
   const digits = mantissa.replace("-", "−");
   if (exponent === 0) return digits;
   const power = `10${superscript(exponent)}`;
-  return mantissa === "1" ? power : `${digits} × ${power}`;
+  if (mantissa === "1") return power;
+  return mantissa === "-1" ? `−${power}` : `${digits} × ${power}`;
 }
 
 /** The same as TeX; a mantissa of 1 is left out. */
