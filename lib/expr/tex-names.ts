@@ -49,8 +49,11 @@ export function nameTex(name: string): string {
   const at = name.indexOf("_");
   const base = at < 0 ? name : name.slice(0, at);
   const subscript = at < 0 ? "" : name.slice(at + 1);
-  const dotted = /^(.*)_(d?dot)$/.exec(subscript);
-  if (dotted) return `\\${dotted[2]}{${letterTex(base)}}_{${subscriptTex(dotted[1] ?? "")}}`;
+  const [, before, dot, behind] = /^(?:(.+)_)?(d?dot)(?:_(.+))?$/.exec(subscript) ?? [];
+  const rest = before ?? behind;
+  if (dot && rest && !(before && behind)) {
+    return `\\${dot}{${letterTex(base)}}_{${subscriptTex(rest)}}`;
+  }
   const [, word = base, digits = ""] = /^(.*?)(\d*)$/.exec(base) ?? [];
   if (subscript === "") return letterTex(base);
   const below = digits === "" ? subscriptTex(subscript) : `${digits},\\,${subscriptTex(subscript)}`;

@@ -13,12 +13,14 @@ export interface TexContext {
 
 /** How tightly a piece of TeX holds together. */
 enum Binding {
-  Condition = 0,
-  Sum = 1,
-  Product = 2,
-  Sign = 3,
-  Power = 4,
-  Atom = 5,
+  Or,
+  And,
+  Condition,
+  Sum,
+  Product,
+  Sign,
+  Power,
+  Atom,
 }
 
 interface Piece {
@@ -168,8 +170,9 @@ function binaryPiece(tree: Extract<Tree, { type: "binary" }>, context: TexContex
   const left = pieceOf(tree.left, context);
   const right = pieceOf(tree.right, context);
   if (operator === "and" || operator === "or") {
-    const tex = `${wrapped(left, Binding.Condition)}\\ \\text{${operator}}\\ ${wrapped(right, Binding.Condition)}`;
-    return { tex, binding: Binding.Condition };
+    const binding = operator === "or" ? Binding.Or : Binding.And;
+    const tex = `${wrapped(left, binding)}\\ \\text{${operator}}\\ ${wrapped(right, binding)}`;
+    return { tex, binding };
   }
   const rightTex =
     right.binding === Binding.Sign
