@@ -12,7 +12,7 @@ import { bracketed, formulas, written } from "./random-formulas";
 import { shape } from "./tree-shape";
 
 // The library calls nearly equal numbers equal; kernels do so in comparisons only, and never round up.
-const library = create(all, { number: "number", relTol: 1e-15, absTol: 0 });
+const library = create(all ?? {}, { number: "number", relTol: 1e-15, absTol: 0 });
 library.import({ floor: Math.floor, ceil: Math.ceil }, { override: true });
 const roles = { functions: new Set<string>(), quantities: new Set(["x", "y", "z"]) };
 const scope = makeScope({ edition: "codata-2018", em: "si" }, (name) =>

@@ -66,3 +66,9 @@ export function bracketed(made: Made): string {
   if ("sign" in made) return `(- ${bracketed(made.of)})`;
   return `(${bracketed(made.left)} ${made.op} ${bracketed(made.right)})`;
 }
+
+/** The same in the notation of the platform, as a function of x, y and z. Without calls. */
+export function asFunction(made: Made): (x: number, y: number, z: number) => number {
+  const text = bracketed(made).replaceAll("^", "**");
+  return new Function("x", "y", "z", `return ${text};`) as ReturnType<typeof asFunction>;
+}
