@@ -49,7 +49,11 @@ function inferRoot(tree: Kind<"call">, context: Context, rule: RuleOf<"root">): 
   );
   const degree = rootDegree(tree, context, rule.degree);
   const of = powerDimension(parts[0]?.dimension ?? dimensionless, degree.inverse());
-  return make(tree, of, { op: "call", name: tree.name, parts });
+  // What decides a dimension is a number from here on, as the exponent of a power is.
+  const fixed = parts.map((part, i) =>
+    i === 0 ? part : make(part, dimensionless, { op: "number", value: degree.valueOf() }),
+  );
+  return make(tree, of, { op: "call", name: tree.name, parts: fixed });
 }
 
 function inferSame(tree: Kind<"call">, context: Context): readonly Typed[] {
